@@ -1,0 +1,12 @@
+import type { NextConfig } from 'next';
+
+const config: NextConfig = {
+  // The tests build beside a running product, never over it.
+  distDir: process.env.MARLWICK_BUILD_DIR ?? '.next',
+  poweredByHeader: false,
+  reactStrictMode: true,
+  // Native and dynamic modules that the bundler must leave to Node.
+  serverExternalPackages: ['knex', 'pg', '@node-rs/argon2', 'pino'],
+};
+
+export default config;
