@@ -1,0 +1,21 @@
+import type { Knex } from 'knex';
+import * as peopleAndPlants from './20261201090000_people_and_plants';
+import * as samples from './20261201091000_samples';
+import * as plans from './20261201092000_plans';
+
+const migrations: Readonly<Record<string, Knex.Migration>> = {
+  '20261201090000_people_and_plants': peopleAndPlants,
+  '20261201091000_samples': samples,
+  '20261201092000_plans': plans,
+};
+
+/** Imported rather than read from disk, so that every runner (tsx, vitest, knex) finds the same list. */
+export const migrationSource: Knex.MigrationSource<string> = {
+  getMigrations: () => Promise.resolve(Object.keys(migrations).sort()),
+  getMigrationName: (name) => name,
+  getMigration: (name) => {
+    const migration = migrations[name];
+    if (migration === undefined) throw new Error(`Unknown migration ${name}`);
+    return Promise.resolve(migration);
+  },
+};
