@@ -1,0 +1,6 @@
+import NextAuth from 'next-auth';
+import { authOptions } from '@/lib/auth/options';
+
+const handler = NextAuth(authOptions) as (request: Request, context: unknown) => Promise<Response>;
+
+export { handler as GET, handler as POST };

@@ -1,0 +1,27 @@
+import type { NextAuthOptions } from 'next-auth';
+import CredentialsProvider from 'next-auth/providers/credentials';
+import { paths } from '@/lib/paths';
+import { checkSignIn } from './check-sign-in';
+
+declare module 'next-auth' {
+  interface Session {
+    personId: string;
+  }
+}
+
+const ONE_SHIFT_S = 12 * 60 * 60;
+
+export const authOptions: NextAuthOptions = {
+  session: { strategy: 'jwt', maxAge: ONE_SHIFT_S },
+  pages: { signIn: paths.signIn },
+  providers: [
+    CredentialsProvider({
+      credentials: { email: {}, password: {} },
+      authorize: (credentials) => checkSignIn(credentials),
+    }),
+  ],
+  callbacks: {
+    // The token names the person only; role and organisation are read from the database at each request.
+    session: ({ session, token }) => ({ ...session, personId: token.sub ?? '' }),
+  },
+};
