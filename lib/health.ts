@@ -7,7 +7,7 @@ export async function pingDatabase(): Promise<boolean> {
     await database().raw('select 1');
     return true;
   } catch (error) {
-    logger.error({ error }, 'the database does not answer');
+    logger.error({ err: error }, 'the database does not answer');
     return false;
   }
 }

@@ -14,6 +14,7 @@ import type {
   Plant,
   PointQuantity,
   SamplingPoint,
+  ShiftNote,
   Target,
   TrainStep,
 } from '@/lib/plants/schema';
@@ -148,13 +149,6 @@ export async function listDosingPoints(
     doseMgPerL: row.dose_mg_per_l,
     setAt: row.set_at,
   }));
-}
-
-export interface ShiftNote {
-  id: string;
-  body: string;
-  writtenAt: Date;
-  author: string;
 }
 
 export async function listShiftNotes(

@@ -9,7 +9,7 @@ export function errorToJson(error: unknown): Response {
       { status: error.status },
     );
   }
-  logger.error({ error }, 'a request failed');
+  logger.error({ err: error }, 'a request failed');
   return Response.json(
     { error: { code: 'internal', message: 'Something went wrong on our side.' } },
     { status: 500 },

@@ -33,7 +33,7 @@ export function memberAction<Schema extends z.ZodType, Value>(
       return { ok: true, value: await useCase(actor, parsed.data) };
     } catch (error) {
       if (error instanceof AppError) return refused(error.userMessage, []);
-      logger.error({ error, permission }, 'an action failed');
+      logger.error({ err: error, permission }, 'an action failed');
       return refused('Something went wrong on our side. Nothing was saved; please try again.', []);
     }
   };

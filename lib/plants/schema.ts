@@ -71,3 +71,10 @@ export interface DosingPoint {
   readonly doseMgPerL: number | null;
   readonly setAt: Date | null;
 }
+
+export interface ShiftNote {
+  readonly id: string;
+  readonly body: string;
+  readonly writtenAt: Date;
+  readonly author: string;
+}

@@ -1,0 +1,91 @@
+import Link from 'next/link';
+import { formatAge, formatDayTime, formatTime } from '@/lib/format';
+import { paths } from '@/lib/paths';
+import type { Reading, Station } from '@/lib/today/schema';
+import { Figure } from '@/components/ui/figure';
+import { Formula } from '@/components/ui/formula';
+
+/** The line shows this many; a missed target is always among them (targets lead the list), the rest is one tap away. */
+const READINGS_SHOWN = 6;
+
+const VERDICT_WORDS = {
+  below: { sign: '▼', word: 'low' },
+  above: { sign: '▲', word: 'high' },
+} as const;
+
+/** What the last samples at one point said, against target, and how old that is. */
+export function StationReadings({
+  station,
+  organisationSlug,
+  plantSlug,
+  timeZone,
+  now,
+}: {
+  station: Station;
+  organisationSlug: string;
+  plantSlug: string;
+  timeZone: string;
+  now: Date;
+}) {
+  const { lastSample, due } = station;
+  return (
+    <section aria-label={station.name} className="max-w-md border-t border-rule pt-1">
+      <p className="flex flex-wrap items-baseline gap-x-2 text-sm text-ink-soft">
+        <span className="text-ink italic">{station.name}</span>
+        {lastSample === null ? (
+          <span>no sample yet</span>
+        ) : (
+          <Link
+            href={paths.sample(organisationSlug, plantSlug, lastSample.id)}
+            title={formatDayTime(lastSample.takenAt, timeZone)}
+            className="inline-flex min-h-6 items-center"
+          >
+            {formatTime(lastSample.takenAt, timeZone)}, {formatAge(lastSample.takenAt, now)}
+          </Link>
+        )}
+      </p>
+      <dl className="ruled">
+        {station.readings.slice(0, READINGS_SHOWN).map((reading) => (
+          <ReadingLine key={reading.key} reading={reading} isOlder={isOlder(reading, station)} />
+        ))}
+      </dl>
+      {due !== null && due.state !== 'done' ? (
+        <p className="mt-1">
+          <Link
+            href={paths.newSample(organisationSlug, plantSlug, station.slug)}
+            className="inline-flex min-h-touch items-center text-sm font-semibold"
+          >
+            {due.state === 'overdue' ? 'Sample overdue' : 'Sample due soon'}: enter one
+          </Link>
+        </p>
+      ) : null}
+    </section>
+  );
+}
+
+const isOlder = (reading: Reading, station: Station): boolean =>
+  station.lastSample !== null && reading.takenAt < station.lastSample.takenAt;
+
+function ReadingLine({ reading, isOlder }: { reading: Reading; isOlder: boolean }) {
+  const missed = reading.verdict === 'below' || reading.verdict === 'above';
+  return (
+    <div className="flex items-baseline justify-between gap-2 py-0.5 text-[0.95rem]">
+      <dt title={reading.as.label} className={isOlder ? 'text-ink-soft' : ''}>
+        <Formula>{reading.as.short}</Formula>
+        {isOlder ? <span className="unit"> earlier</span> : null}
+      </dt>
+      <dd className={`text-right ${missed ? 'font-semibold text-rust' : ''}`}>
+        {missed && reading.verdict !== null && reading.verdict !== 'within' ? (
+          <span className="mr-1 text-xs whitespace-nowrap">
+            <span aria-hidden="true">{VERDICT_WORDS[reading.verdict].sign}</span>{' '}
+            {VERDICT_WORDS[reading.verdict].word}
+          </span>
+        ) : null}
+        <Figure unit={shortUnit(reading.as.unit)}>{reading.text}</Figure>
+      </dd>
+    </div>
+  );
+}
+
+/** In the narrow column the basis is left to the sample's own page. */
+const shortUnit = (unit: string): string => unit.split(' as ')[0] ?? unit;
