@@ -9,8 +9,9 @@ import { AppError, notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { momentFromLocal } from '@/lib/plants/local-time';
 import { getPlant } from '@/lib/plants/read-plants';
+import { measuredValues } from './measured-values';
 import type { SampleToKeep } from './schema';
-import { solveSample, type MeasuredValues, type SampleSolution } from './solve-sample';
+import { solveSample, type SampleSolution } from './solve-sample';
 
 /** A clock that runs ahead by a few minutes is no reason to refuse a sample. */
 const CLOCK_TOLERANCE_MS = 10 * 60_000;
@@ -61,14 +62,6 @@ export async function saveSample(
   );
   return { sampleId };
 }
-
-/** Results by quantity, as the engine sees them. */
-export const measuredValues = (
-  results: readonly { quantity: string; value: number; qualifier: '' | '<' | '>' | 'nd' | 'e' }[],
-): MeasuredValues =>
-  Object.fromEntries(
-    results.map(({ quantity, value, qualifier }) => [quantity, { value, qualifier }]),
-  );
 
 /** What is stored of a solution; nothing when the sample has too little in it to be asked about. */
 export function solutionToKeep(solution: SampleSolution) {
