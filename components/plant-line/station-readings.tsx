@@ -67,20 +67,20 @@ const isOlder = (reading: Reading, station: Station): boolean =>
   station.lastSample !== null && reading.takenAt < station.lastSample.takenAt;
 
 function ReadingLine({ reading, isOlder }: { reading: Reading; isOlder: boolean }) {
-  const missed = reading.verdict === 'below' || reading.verdict === 'above';
+  const miss =
+    reading.verdict === null || reading.verdict === 'within' ? null : VERDICT_WORDS[reading.verdict];
   return (
     <div className="flex items-baseline justify-between gap-2 py-0.5 text-[0.95rem]">
       <dt title={reading.as.label} className={isOlder ? 'text-ink-soft' : ''}>
         <Formula>{reading.as.short}</Formula>
         {isOlder ? <span className="unit"> earlier</span> : null}
       </dt>
-      <dd className={`text-right ${missed ? 'font-semibold text-rust' : ''}`}>
-        {missed && reading.verdict !== null && reading.verdict !== 'within' ? (
+      <dd className={`text-right ${miss === null ? '' : 'font-semibold text-rust'}`}>
+        {miss === null ? null : (
           <span className="mr-1 text-xs whitespace-nowrap">
-            <span aria-hidden="true">{VERDICT_WORDS[reading.verdict].sign}</span>{' '}
-            {VERDICT_WORDS[reading.verdict].word}
+            <span aria-hidden="true">{miss.sign}</span> {miss.word}
           </span>
-        ) : null}
+        )}
         <Figure unit={shortUnit(reading.as.unit)}>{reading.text}</Figure>
       </dd>
     </div>

@@ -77,4 +77,4 @@ export const TARGETS = {
   chlorideSulfateMassRatio: { label: 'Chloride-to-sulfate mass ratio', unit: '', decimals: 2 },
 } as const satisfies Record<TargetQuantity, { label: string; unit: string; decimals: number }>;
 
-export const TARGET_KEYS = Object.keys(TARGETS) as TargetQuantity[];
+export const TARGET_KEYS = Object.keys(TARGETS) as (keyof typeof TARGETS)[];
