@@ -2,7 +2,6 @@ import Link from 'next/link';
 import { formatAge, formatDayTime, formatTime } from '@/lib/format';
 import { paths } from '@/lib/paths';
 import type { Reading, Station } from '@/lib/today/schema';
-import { Figure } from '@/components/ui/figure';
 import { Formula } from '@/components/ui/formula';
 
 /** The line shows this many; a missed target is always among them (targets lead the list), the rest is one tap away. */
@@ -29,7 +28,7 @@ export function StationReadings({
 }) {
   const { lastSample, due } = station;
   return (
-    <section aria-label={station.name} className="max-w-md border-t border-rule pt-1">
+    <section aria-label={station.name} className="max-w-2xl border-t border-rule pt-1">
       <p className="flex flex-wrap items-baseline gap-x-2 text-sm text-ink-soft">
         <span className="text-ink italic">{station.name}</span>
         {lastSample === null ? (
@@ -44,7 +43,7 @@ export function StationReadings({
           </Link>
         )}
       </p>
-      <dl className="ruled">
+      <dl className="gap-x-8 sm:max-xl:columns-2">
         {station.readings.slice(0, READINGS_SHOWN).map((reading) => (
           <ReadingLine key={reading.key} reading={reading} isOlder={isOlder(reading, station)} />
         ))}
@@ -70,7 +69,7 @@ function ReadingLine({ reading, isOlder }: { reading: Reading; isOlder: boolean 
   const miss =
     reading.verdict === null || reading.verdict === 'within' ? null : VERDICT_WORDS[reading.verdict];
   return (
-    <div className="flex items-baseline justify-between gap-2 py-0.5 text-[0.95rem]">
+    <div className="grid break-inside-avoid grid-cols-[1fr_auto_3.1rem] items-baseline gap-x-1.5 border-t border-rule py-0.5 text-[0.95rem]">
       <dt title={reading.as.label} className={isOlder ? 'text-ink-soft' : ''}>
         <Formula>{reading.as.short}</Formula>
         {isOlder ? <span className="unit"> earlier</span> : null}
@@ -81,11 +80,15 @@ function ReadingLine({ reading, isOlder }: { reading: Reading; isOlder: boolean 
             <span aria-hidden="true">{miss.sign}</span> {miss.word}
           </span>
         )}
-        <Figure unit={shortUnit(reading.as.unit)}>{reading.text}</Figure>
+        <span className="figure">{reading.text}</span>
+      </dd>
+      <dd className="unit">
+        <Formula>{shortUnit(reading.as.unit)}</Formula>
       </dd>
     </div>
   );
 }
 
 /** In the narrow column the basis is left to the sample's own page. */
-const shortUnit = (unit: string): string => unit.split(' as ')[0] ?? unit;
+const shortUnit = (unit: string): string =>
+  unit === 'pH' ? '' : (unit.split(/ as | Pt/)[0] ?? unit);

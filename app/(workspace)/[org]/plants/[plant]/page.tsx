@@ -9,6 +9,7 @@ import { roleMay } from '@/lib/auth/permissions';
 import { paths } from '@/lib/paths';
 import { readToday } from '@/lib/today/read-today';
 import { DueList } from './due-list';
+import { InBrief } from './in-brief';
 import { OutOfTarget } from './out-of-target';
 import { pagePlant } from './page-plant';
 import { ShiftNotes } from './shift-notes';
@@ -41,6 +42,7 @@ export default async function TodayPage({
         {formatWeekday(today.now, plant.timeZone)}. {plant.sourceSummary},{' '}
         {formatNumber(plant.designFlowMlPerD, 0)} ML/d design flow.
       </PageHeading>
+      <InBrief today={today} />
       <PlantLine steps={today.steps} {...slugs} timeZone={plant.timeZone} now={today.now} />
       <div className="mt-8 grid gap-x-10 gap-y-8 border-t border-rule-strong pt-6 lg:grid-cols-3">
         <OutOfTarget today={today} {...slugs} />
