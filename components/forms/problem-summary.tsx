@@ -37,7 +37,9 @@ export function ProblemSummary({
       <ul className="mt-1">
         {problems.map(({ label, message, fieldId }) => (
           <li key={`${label} ${message}`}>
-            {fieldId === undefined ? label : (
+            {fieldId === undefined ? (
+              label
+            ) : (
               <a
                 href={`#${fieldId}`}
                 onClick={(event) => {

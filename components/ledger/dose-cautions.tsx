@@ -5,7 +5,10 @@ import { cautionsFor, GENERAL_CAUTION } from '@/lib/plans/cautions';
 export function DoseCautions({ reagents }: { reagents: readonly ReagentKey[] }) {
   const sentences = [...new Set(reagents.flatMap((reagent) => cautionsFor(reagent)))];
   return (
-    <section aria-label="Cautions" className="border-l-4 border-ochre bg-ochre-wash px-4 py-3 text-[0.95rem]">
+    <section
+      aria-label="Cautions"
+      className="border-l-4 border-ochre bg-ochre-wash px-4 py-3 text-[0.95rem]"
+    >
       <p>
         <strong className="text-ochre">Before you feed anything.</strong> {GENERAL_CAUTION}
       </p>

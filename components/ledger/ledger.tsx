@@ -93,7 +93,8 @@ export function LedgerLine({
   equilibrium: number | null;
   decimals: number;
 }) {
-  const row = before === null || equilibrium === null ? null : writeRow(before, equilibrium, decimals);
+  const row =
+    before === null || equilibrium === null ? null : writeRow(before, equilibrium, decimals);
   const write = (value: number | null | undefined) =>
     value === null || value === undefined ? '–' : formatNumber(value, decimals);
   const figure = 'figure py-1 pl-4 text-right';

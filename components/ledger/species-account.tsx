@@ -21,7 +21,12 @@ export function SpeciesAccount({ rows }: { rows: readonly LedgerRow[] }) {
       <summary className="flex min-h-touch items-center py-2 font-semibold text-verdigris">
         ▸ Species, {written.length} of them, before and at equilibrium
       </summary>
-      <div className="overflow-x-auto pb-4" tabIndex={0} role="region" aria-label="Ledger of species">
+      <div
+        className="overflow-x-auto pb-4"
+        tabIndex={0}
+        role="region"
+        aria-label="Ledger of species"
+      >
         <table className="w-full min-w-136">
           <LedgerHead first="Species, µmol/L" />
           <tbody>

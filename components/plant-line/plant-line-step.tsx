@@ -28,7 +28,9 @@ export function PlantLineStep({
     <li className="relative grid grid-cols-[3.5rem_1fr] gap-x-4 pb-6 last:pb-0 xl:row-span-4 xl:grid-cols-1 xl:grid-rows-subgrid xl:gap-x-0 xl:pb-0">
       <ul
         className={`order-2 col-start-2 flex flex-wrap gap-x-6 gap-y-1 xl:order-none xl:col-start-1 xl:flex-col xl:justify-end xl:gap-2 xl:pr-3 ${
-          step.dosing.length === 0 ? '' : 'mb-2 xl:mb-0 xl:self-end xl:border-l xl:border-ink xl:pl-2.5'
+          step.dosing.length === 0
+            ? ''
+            : 'mb-2 xl:mb-0 xl:self-end xl:border-l xl:border-ink xl:pl-2.5'
         }`}
       >
         {step.dosing.map((point) => (

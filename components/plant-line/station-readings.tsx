@@ -67,7 +67,9 @@ const isOlder = (reading: Reading, station: Station): boolean =>
 
 function ReadingLine({ reading, isOlder }: { reading: Reading; isOlder: boolean }) {
   const miss =
-    reading.verdict === null || reading.verdict === 'within' ? null : VERDICT_WORDS[reading.verdict];
+    reading.verdict === null || reading.verdict === 'within'
+      ? null
+      : VERDICT_WORDS[reading.verdict];
   return (
     <div className="grid break-inside-avoid grid-cols-[1fr_auto_3.1rem] items-baseline gap-x-1.5 border-t border-rule py-0.5 text-[0.95rem]">
       <dt title={reading.as.label} className={isOlder ? 'text-ink-soft' : ''}>

@@ -2,8 +2,10 @@ import type { ButtonHTMLAttributes, ReactNode } from 'react';
 
 const SHAPES = {
   main: 'bg-verdigris text-verdigris-on border-verdigris hover:bg-verdigris-deep hover:border-verdigris-deep',
-  plain: 'bg-transparent text-verdigris border-rule-strong hover:border-verdigris hover:bg-verdigris-wash',
-  quiet: 'bg-transparent text-ink-soft border-transparent hover:text-ink underline underline-offset-4',
+  plain:
+    'bg-transparent text-verdigris border-rule-strong hover:border-verdigris hover:bg-verdigris-wash',
+  quiet:
+    'bg-transparent text-ink-soft border-transparent hover:text-ink underline underline-offset-4',
 } as const;
 
 export const buttonClass = (shape: keyof typeof SHAPES = 'plain'): string =>

@@ -137,9 +137,11 @@ export async function listDosingPoints(
       'dosing_points.plant_id': plantId,
     })
     .orderBy('dosing_points.position')
-    .select<
-      (DosingPointRow & { dose_mg_per_l: number | null; set_at: Date | null })[]
-    >('dosing_points.*', 'in_force.dose_mg_per_l', 'in_force.set_at');
+    .select<(DosingPointRow & { dose_mg_per_l: number | null; set_at: Date | null })[]>(
+      'dosing_points.*',
+      'in_force.dose_mg_per_l',
+      'in_force.set_at',
+    );
   return rows.map((row) => ({
     id: row.id,
     trainStepId: row.train_step_id,

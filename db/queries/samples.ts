@@ -135,9 +135,13 @@ export async function findSample(
       'samples.id': sampleId,
     })
     .first<
-      | (SampleRow & { point_slug: string; point_name: string; person_name: string })
-      | undefined
-    >('samples.*', 'sampling_points.slug as point_slug', 'sampling_points.name as point_name', 'people.name as person_name');
+      (SampleRow & { point_slug: string; point_name: string; person_name: string }) | undefined
+    >(
+      'samples.*',
+      'sampling_points.slug as point_slug',
+      'sampling_points.name as point_name',
+      'people.name as person_name',
+    );
   if (sample === undefined) return undefined;
   const own = { organisation_id: organisationId, sample_id: sampleId };
   const [results, indices, solution] = await Promise.all([
@@ -162,11 +166,14 @@ export async function findSample(
       value: row.value,
     })),
     indices: Object.fromEntries(indices.map(({ quantity, value }) => [quantity, value])),
-    solution: solution === undefined ? null : {
-      engineVersion: solution.engine_version,
-      constantsHash: solution.constants_hash,
-      assumptions: solution.assumptions as string[],
-      refusal: solution.refusal,
-    },
+    solution:
+      solution === undefined
+        ? null
+        : {
+            engineVersion: solution.engine_version,
+            constantsHash: solution.constants_hash,
+            assumptions: solution.assumptions as string[],
+            refusal: solution.refusal,
+          },
   };
 }

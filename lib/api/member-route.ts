@@ -29,9 +29,7 @@ export function memberRoute<Schema extends z.ZodType>(
       if (!query.success) {
         throw new AppError(
           'badInput',
-          query.error.issues
-            .map((issue) => `${issue.path.join('.')}: ${issue.message}`)
-            .join(' '),
+          query.error.issues.map((issue) => `${issue.path.join('.')}: ${issue.message}`).join(' '),
         );
       }
       return Response.json(await useCase(actor, query.data, { ...params, org }), {

@@ -21,10 +21,7 @@ export const actorFor = cache(
 );
 
 /** The actor of this page: signed out goes to sign in, what is not theirs is not found. */
-export async function pageActor(
-  organisationSlug: string,
-  permission: Permission,
-): Promise<Actor> {
+export async function pageActor(organisationSlug: string, permission: Permission): Promise<Actor> {
   try {
     return await actorFor(organisationSlug, permission);
   } catch (error) {

@@ -6,12 +6,7 @@ export const ROLES = ['operator', 'consultant', 'manager', 'owner'] as const;
 export type Role = (typeof ROLES)[number];
 
 export type Permission =
-  | 'plant.read'
-  | 'sample.read'
-  | 'sample.write'
-  | 'plan.read'
-  | 'plan.write'
-  | 'trend.read';
+  'plant.read' | 'sample.read' | 'sample.write' | 'plan.read' | 'plan.write' | 'trend.read';
 
 export const PERMISSIONS = {
   'plant.read': ['operator', 'consultant', 'manager', 'owner'],

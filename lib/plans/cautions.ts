@@ -9,11 +9,14 @@ type Hazard = 'acid' | 'alkali' | 'quicklime' | 'gas' | 'chlorine' | 'fluoride' 
 // Usual handling cautions of the trade; the supplier's safety data sheet rules.
 const HAZARD_SENTENCES: Record<Hazard, string> = {
   acid: 'Acid: add acid to water, never water to acid; keep it from hypochlorite, with which it gives off chlorine gas.',
-  alkali: 'Strong alkali: burns skin and eyes; never feed it into the same line as a metal coagulant.',
+  alkali:
+    'Strong alkali: burns skin and eyes; never feed it into the same line as a metal coagulant.',
   quicklime: 'Quicklime heats violently with little water: slake by the plant’s procedure only.',
   gas: 'Carbon dioxide displaces air: ventilate and watch the oxygen alarm in low places.',
-  chlorine: 'Chlorine product: never together with acid, coagulant or ammonia in one line, tank or fill point.',
-  fluoride: 'Fluoride: an overfeed makes people ill; interlock with flow and check the day’s use against the stock.',
+  chlorine:
+    'Chlorine product: never together with acid, coagulant or ammonia in one line, tank or fill point.',
+  fluoride:
+    'Fluoride: an overfeed makes people ill; interlock with flow and check the day’s use against the stock.',
   ammonia: 'Ammonia: store and feed apart from chlorine products.',
 };
 

@@ -1,4 +1,12 @@
-import { applyDose, accountFor, solveWater, type Ledger, type ReagentKey, type Water, type WaterAnalysis } from '@/lib/engine';
+import {
+  applyDose,
+  accountFor,
+  solveWater,
+  type Ledger,
+  type ReagentKey,
+  type Water,
+  type WaterAnalysis,
+} from '@/lib/engine';
 import type { PlanQuantity } from './quantities';
 
 /** Quantities before and at equilibrium, as the server found them when the plan was saved. */

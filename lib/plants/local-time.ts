@@ -8,7 +8,9 @@ export function momentFromLocal(local: string, timeZone: string): Date | null {
   const [year = 0, month = 1, day = 1, hour = 0, minute = 0] = match.slice(1).map(Number);
   const moment = new Date(new TZDate(year, month - 1, day, hour, minute, timeZone).getTime());
   // A 31 June rolls over and a skipped hour moves on: neither is what was written.
-  return Number.isNaN(moment.getTime()) || localFromMoment(moment, timeZone) !== local ? null : moment;
+  return Number.isNaN(moment.getTime()) || localFromMoment(moment, timeZone) !== local
+    ? null
+    : moment;
 }
 
 export const localFromMoment = (moment: Date, timeZone: string): string =>

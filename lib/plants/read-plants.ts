@@ -6,8 +6,8 @@ import { notFound } from '@/lib/errors';
 import type { Plant } from './schema';
 
 /** The works of the actor's organisation, in its own order. */
-export const readPlants = cache(
-  (actor: Actor): Promise<Plant[]> => listPlants(database(), actor.organisation.id),
+export const readPlants = cache((actor: Actor): Promise<Plant[]> =>
+  listPlants(database(), actor.organisation.id),
 );
 
 /** Throws `notFound` for a works that is not the actor's. */

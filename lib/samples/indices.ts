@@ -40,7 +40,8 @@ const table: Record<IndexKey, Omit<IndexDescription, 'key'>> = {
     short: 'LSI',
     unit: '',
     decimals: 2,
-    meaning: 'pH minus saturation pH; above 0 the water can deposit calcite, below 0 it can dissolve it',
+    meaning:
+      'pH minus saturation pH; above 0 the water can deposit calcite, below 0 it can dissolve it',
   },
   precipitationPotential: {
     label: 'Calcium carbonate precipitation potential',

@@ -43,14 +43,17 @@ export async function readEntrySheet(
           decimals,
           usualLow,
           usualHigh,
-          last: last === undefined ? null : {
-            text: `${last.qualifier === '<' || last.qualifier === '>' ? last.qualifier : ''}${
-              last.enteredUnit === unit && last.enteredText !== null
-                ? last.enteredText
-                : writeValue(quantity, last.value, as)
-            }`,
-            age: formatAge(last.takenAt, now),
-          },
+          last:
+            last === undefined
+              ? null
+              : {
+                  text: `${last.qualifier === '<' || last.qualifier === '>' ? last.qualifier : ''}${
+                    last.enteredUnit === unit && last.enteredText !== null
+                      ? last.enteredText
+                      : writeValue(quantity, last.value, as)
+                  }`,
+                  age: formatAge(last.takenAt, now),
+                },
         },
       ];
     });

@@ -3,7 +3,12 @@ import type { Qualifier } from './solve-sample';
 /** What a person wrote in a result's field, understood or explained. */
 export type Measurement =
   | { readonly kind: 'empty' }
-  | { readonly kind: 'value'; readonly value: number; readonly qualifier: Qualifier; readonly text: string }
+  | {
+      readonly kind: 'value';
+      readonly value: number;
+      readonly qualifier: Qualifier;
+      readonly text: string;
+    }
   | { readonly kind: 'problem'; readonly message: string };
 
 const SIGNS: readonly (readonly [RegExp, Qualifier])[] = [
@@ -26,7 +31,10 @@ export function readMeasurement(typed: string, chosen: Qualifier = ''): Measurem
   const text = sign === undefined ? trimmed : trimmed.replace(sign[0], '').trim();
   const qualifier = sign === undefined ? chosen : sign[1];
   if (text === '' || text === '-' || text === '+' || text === '.') {
-    return { kind: 'problem', message: `“${typed.trim()}” has no figures yet. Write the number after it.` };
+    return {
+      kind: 'problem',
+      message: `“${typed.trim()}” has no figures yet. Write the number after it.`,
+    };
   }
   if (text.includes(',')) return { kind: 'problem', message: commaMessage(text) };
   if (!DECIMAL.test(text)) {

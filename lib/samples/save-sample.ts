@@ -32,10 +32,16 @@ export async function saveSample(
   if (point === undefined) throw notFound('sampling point');
   const takenAt = momentFromLocal(input.takenAtLocal, plant.timeZone);
   if (takenAt === null) {
-    throw new AppError('badInput', `There was no ${input.takenAtLocal.replace('T', ', ')} at this plant.`);
+    throw new AppError(
+      'badInput',
+      `There was no ${input.takenAtLocal.replace('T', ', ')} at this plant.`,
+    );
   }
   if (takenAt.getTime() > clock().getTime() + CLOCK_TOLERANCE_MS) {
-    throw new AppError('badInput', 'The sample would be taken in the future. Check the day and time.');
+    throw new AppError(
+      'badInput',
+      'The sample would be taken in the future. Check the day and time.',
+    );
   }
   const listed = new Set(
     (await listPointQuantities(...scope))

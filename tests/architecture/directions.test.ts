@@ -52,13 +52,19 @@ describe('import directions', () => {
 
   it('the engine imports only itself', () => {
     expect(
-      violations(inside('lib/engine'), ({ target, isPackage }) => isPackage || !inside('lib/engine')(target)),
+      violations(
+        inside('lib/engine'),
+        ({ target, isPackage }) => isPackage || !inside('lib/engine')(target),
+      ),
     ).toEqual([]);
   });
 
   it('the engine’s numeric room imports nothing outside itself', () => {
     expect(
-      violations(inside('lib/engine/numeric'), ({ target }) => !inside('lib/engine/numeric')(target)),
+      violations(
+        inside('lib/engine/numeric'),
+        ({ target }) => !inside('lib/engine/numeric')(target),
+      ),
     ).toEqual([]);
   });
 
@@ -72,9 +78,7 @@ describe('import directions', () => {
   });
 
   it('only db imports knex and pg', () => {
-    expect(
-      violations((file) => !inside('db')(file), isPackage('knex', 'pg')),
-    ).toEqual([]);
+    expect(violations((file) => !inside('db')(file), isPackage('knex', 'pg'))).toEqual([]);
   });
 
   it('db imports from lib only env and errors, and types', () => {
@@ -127,7 +131,10 @@ describe('import directions', () => {
 
   it('chart.js is drawn only in components/charts', () => {
     expect(
-      violations((file) => !inside('components/charts')(file), isPackage('chart.js', 'react-chartjs-2')),
+      violations(
+        (file) => !inside('components/charts')(file),
+        isPackage('chart.js', 'react-chartjs-2'),
+      ),
     ).toEqual([]);
   });
 
@@ -136,7 +143,9 @@ describe('import directions', () => {
       .filter(isClient)
       .flatMap((file) =>
         [...reached(file)]
-          .filter((target) => inside('db')(target) || target === 'server-only' || target === 'lib/env.ts')
+          .filter(
+            (target) => inside('db')(target) || target === 'server-only' || target === 'lib/env.ts',
+          )
           .map((target) => `${file} ⇢ ${target}`),
       );
     expect(leaks).toEqual([]);
@@ -169,10 +178,29 @@ describe('import directions', () => {
 describe('the house', () => {
   it('has the top level that was agreed, and nothing that nobody expects', () => {
     const agreed = [
-      'README.md', 'DEVELOPERS.md', 'app', 'components', 'lib', 'db', 'public', 'tests',
-      'docker-free-scripts', 'package.json', 'package-lock.json', 'tsconfig.json', 'knexfile.ts',
-      'tailwind.config.ts', 'next.config.ts', 'postcss.config.mjs', 'eslint.config.mjs',
-      'vitest.config.ts', 'proxy.ts', 'next-env.d.ts', 'node_modules', 'docs', 'screenshots',
+      'README.md',
+      'DEVELOPERS.md',
+      'app',
+      'components',
+      'lib',
+      'db',
+      'public',
+      'tests',
+      'docker-free-scripts',
+      'package.json',
+      'package-lock.json',
+      'tsconfig.json',
+      'knexfile.ts',
+      'tailwind.config.ts',
+      'next.config.ts',
+      'postcss.config.mjs',
+      'eslint.config.mjs',
+      'vitest.config.ts',
+      'proxy.ts',
+      'next-env.d.ts',
+      'node_modules',
+      'docs',
+      'screenshots',
     ];
     const visible = readdirSync('.').filter((name) => !name.startsWith('.'));
     expect(visible.filter((name) => !agreed.includes(name))).toEqual([]);

@@ -26,7 +26,12 @@ function* walk(folder: string): Generator<string> {
 
 /** Every import of a file, static or dynamic, with type-only ones told apart. */
 export function importsOf(file: string): Import[] {
-  const source = ts.createSourceFile(file, readFileSync(file, 'utf8'), ts.ScriptTarget.Latest, true);
+  const source = ts.createSourceFile(
+    file,
+    readFileSync(file, 'utf8'),
+    ts.ScriptTarget.Latest,
+    true,
+  );
   const found: Import[] = [];
   const visit = (node: ts.Node): void => {
     if (ts.isImportDeclaration(node) && ts.isStringLiteral(node.moduleSpecifier)) {
@@ -71,7 +76,10 @@ function resolve(file: string, specifier: string, isTypeOnly: boolean): Import {
   const base = specifier.startsWith('@/')
     ? specifier.slice(2)
     : normalize(join(dirname(file), specifier));
-  const candidates = [base, ...['.ts', '.tsx', '.mts', '.mjs', '/index.ts'].map((end) => base + end)];
+  const candidates = [
+    base,
+    ...['.ts', '.tsx', '.mts', '.mjs', '/index.ts'].map((end) => base + end),
+  ];
   const target = candidates.find((path) => existsSync(path) && statSync(path).isFile()) ?? base;
   return { target, isPackage: false, isTypeOnly };
 }

@@ -1,5 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { formatAge, formatChange, formatDayTime, formatNumber, formatSignificant } from '@/lib/format';
+import {
+  formatAge,
+  formatChange,
+  formatDayTime,
+  formatNumber,
+  formatSignificant,
+} from '@/lib/format';
 
 describe('numbers on the screen', () => {
   it.each([
@@ -41,6 +47,8 @@ describe('times on the screen', () => {
   });
 
   it('stands in the plant’s own zone', () => {
-    expect(formatDayTime(new Date('2026-07-01T05:30:00Z'), 'Europe/London')).toBe('1 Jul 2026, 06:30');
+    expect(formatDayTime(new Date('2026-07-01T05:30:00Z'), 'Europe/London')).toBe(
+      '1 Jul 2026, 06:30',
+    );
   });
 });

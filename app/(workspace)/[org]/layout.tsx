@@ -22,11 +22,7 @@ export default async function WorkspaceLayout({
       >
         Skip to the page
       </a>
-      <Masthead
-        organisation={actor.organisation}
-        personName={actor.personName}
-        role={actor.role}
-      />
+      <Masthead organisation={actor.organisation} personName={actor.personName} role={actor.role} />
       <PlantTabs
         organisationSlug={actor.organisation.slug}
         plants={plants.map(({ slug, name }) => ({ slug, name }))}

@@ -49,11 +49,14 @@ describe('a sample sheet', () => {
     expect(parsed.error?.issues[0]?.message).toMatch(/at least one result/);
   });
 
-  it.each(['2026-12-01', '2026-12-01 06:30', 'yesterday'])('refuses %j as a time', (takenAtLocal) => {
-    const parsed = sampleInput.safeParse({
-      ...sheet([{ quantity: 'pH', text: '7', unit: 'pH', qualifier: '' }]),
-      takenAtLocal,
-    });
-    expect(parsed.error?.issues[0]?.path).toEqual(['takenAtLocal']);
-  });
+  it.each(['2026-12-01', '2026-12-01 06:30', 'yesterday'])(
+    'refuses %j as a time',
+    (takenAtLocal) => {
+      const parsed = sampleInput.safeParse({
+        ...sheet([{ quantity: 'pH', text: '7', unit: 'pH', qualifier: '' }]),
+        takenAtLocal,
+      });
+      expect(parsed.error?.issues[0]?.path).toEqual(['takenAtLocal']);
+    },
+  );
 });

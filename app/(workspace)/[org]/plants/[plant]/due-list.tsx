@@ -37,7 +37,9 @@ export function DueList({
                   {STATE_WORDS[due.state].word}
                 </strong>{' '}
                 <span className="text-ink-soft">
-                  {due.dueAt === null ? 'never sampled' : `next by ${formatDayTime(due.dueAt, timeZone)}`}
+                  {due.dueAt === null
+                    ? 'never sampled'
+                    : `next by ${formatDayTime(due.dueAt, timeZone)}`}
                 </span>
               </span>
             </li>

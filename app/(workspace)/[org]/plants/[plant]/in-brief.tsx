@@ -10,7 +10,9 @@ export function InBrief({ today }: { today: Today }) {
         : [],
     ),
   );
-  const late = stations.filter(({ due }) => due?.state === 'overdue').map(({ name }) => name.toLowerCase());
+  const late = stations
+    .filter(({ due }) => due?.state === 'overdue')
+    .map(({ name }) => name.toLowerCase());
   if (misses.length === 0 && late.length === 0) {
     return (
       <p className="mb-6 border-y border-rule py-2">

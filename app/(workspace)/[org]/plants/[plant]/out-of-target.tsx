@@ -57,7 +57,9 @@ export function OutOfTarget({
 function targetWords({ target, verdict, key, as }: Reading): string {
   if (target === null) return '';
   const write = (value: number) => formatNumber(inUnit(key, value, as.unit), as.decimals);
-  if (verdict === 'below' && target.lowest !== null) return `Lowest allowed here: ${write(target.lowest)}`;
-  if (verdict === 'above' && target.highest !== null) return `Highest allowed here: ${write(target.highest)}`;
+  if (verdict === 'below' && target.lowest !== null)
+    return `Lowest allowed here: ${write(target.lowest)}`;
+  if (verdict === 'above' && target.highest !== null)
+    return `Highest allowed here: ${write(target.highest)}`;
   return '';
 }

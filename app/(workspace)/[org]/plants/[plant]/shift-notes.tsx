@@ -2,13 +2,7 @@ import { formatDayTime } from '@/lib/format';
 import type { ShiftNote } from '@/lib/plants/schema';
 
 /** The last shift's words: time in the margin, the note on the right of its rule. */
-export function ShiftNotes({
-  notes,
-  timeZone,
-}: {
-  notes: readonly ShiftNote[];
-  timeZone: string;
-}) {
+export function ShiftNotes({ notes, timeZone }: { notes: readonly ShiftNote[]; timeZone: string }) {
   return (
     <section aria-labelledby="shift-notes">
       <h2 id="shift-notes" className="text-xl">

@@ -52,7 +52,9 @@ export default async function PlanPage({
             <Fact name="Why">{plan.reason === '' ? 'no reason was written' : plan.reason}</Fact>
             <Fact name="Engine">
               version {plan.engineVersion}
-              {plan.engineVersion === ENGINE_VERSION ? '' : `; shown with version ${ENGINE_VERSION}`}
+              {plan.engineVersion === ENGINE_VERSION
+                ? ''
+                : `; shown with version ${ENGINE_VERSION}`}
             </Fact>
             <Fact name="Constants">
               <span className="figure text-sm">{plan.constantsHash}</span>

@@ -30,8 +30,8 @@ export default async function NewPlanPage({
         <Link href={paths.sample(organisationSlug, plant.slug, desk.sample.id)}>
           {desk.sample.pointName.toLowerCase()} sample
         </Link>{' '}
-        of {formatDayTime(desk.sample.takenAt, plant.timeZone)}. The water stays closed to the air in
-        this step.
+        of {formatDayTime(desk.sample.takenAt, plant.timeZone)}. The water stays closed to the air
+        in this step.
       </PageHeading>
       <PlanDesk organisationSlug={organisationSlug} plantSlug={plant.slug} desk={desk} />
     </>

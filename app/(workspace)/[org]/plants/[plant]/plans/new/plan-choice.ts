@@ -39,7 +39,8 @@ const FALLBACK_TARGET = { quantity: 'pH', value: 8 } as const;
 
 /** Starts from the plant's own: its finished-water pH target and the reagent that can reach it. */
 export function firstChoice(desk: PlanDeskData, water: Water | null): PlanChoice {
-  const target = desk.plantTargets.find(({ quantity }) => quantity === 'pH') ?? desk.plantTargets[0];
+  const target =
+    desk.plantTargets.find(({ quantity }) => quantity === 'pH') ?? desk.plantTargets[0];
   const quantity = target?.quantity ?? FALLBACK_TARGET.quantity;
   const value = target?.preferred ?? target?.lowest ?? FALLBACK_TARGET.value;
   const candidates: readonly ReagentKey[] = [...desk.plantReagents, 'sodium-hydroxide'];

@@ -49,7 +49,8 @@ export function SavePlan({
           reason,
         });
         if (answer.ok) router.push(paths.plan(organisationSlug, plantSlug, answer.value.planId));
-        else setProblem([answer.message, ...answer.problems.map(({ message }) => message)].join(' '));
+        else
+          setProblem([answer.message, ...answer.problems.map(({ message }) => message)].join(' '));
       } catch {
         setProblem('Marlwick could not be reached, so nothing was saved. Try again.');
       }

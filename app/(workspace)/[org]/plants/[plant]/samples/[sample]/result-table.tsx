@@ -2,12 +2,20 @@ import { Formula } from '@/components/ui/formula';
 import type { KeptSample } from '@/db/queries/samples';
 import { isQuantityKey, QUANTITIES, QUANTITY_KEYS } from '@/lib/samples/quantities';
 
-const QUALIFIER_WORDS = { '': '', '<': '<', '>': '>', nd: 'not detected at', e: 'estimated' } as const;
+const QUALIFIER_WORDS = {
+  '': '',
+  '<': '<',
+  '>': '>',
+  nd: 'not detected at',
+  e: 'estimated',
+} as const;
 
 /** The results exactly as the person wrote them, decimals and qualifier kept. */
 export function ResultTable({ results }: { results: KeptSample['results'] }) {
   const ordered = [...results].sort(
-    (a, b) => QUANTITY_KEYS.findIndex((k) => k === a.quantity) - QUANTITY_KEYS.findIndex((k) => k === b.quantity),
+    (a, b) =>
+      QUANTITY_KEYS.findIndex((k) => k === a.quantity) -
+      QUANTITY_KEYS.findIndex((k) => k === b.quantity),
   );
   return (
     <table className="mt-2 w-full border-y border-rule-strong">
@@ -33,9 +41,7 @@ export function ResultTable({ results }: { results: KeptSample['results'] }) {
                 {text}
               </td>
               <td className="py-1.5 pl-2">
-                <span className="unit">
-                  {unit === label ? '' : <Formula>{unit}</Formula>}
-                </span>
+                <span className="unit">{unit === label ? '' : <Formula>{unit}</Formula>}</span>
               </td>
             </tr>
           );

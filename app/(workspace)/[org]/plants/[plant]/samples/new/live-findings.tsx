@@ -22,7 +22,10 @@ export function LiveFindings({ results }: { results: readonly WrittenResult[] })
   const settled = useDeferredValue(results);
   const solution = useMemo(() => solveSample(understood(settled)), [settled]);
   return (
-    <aside aria-label="What this water says" className="margin-rule self-start pl-5 lg:sticky lg:top-4">
+    <aside
+      aria-label="What this water says"
+      className="margin-rule self-start pl-5 lg:sticky lg:top-4"
+    >
       <h2 className="text-xl">What this water says</h2>
       {solution.ok ? (
         <>

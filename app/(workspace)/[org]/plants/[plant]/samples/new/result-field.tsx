@@ -90,7 +90,9 @@ function Aside({ field: { last, usualLow, usualHigh, decimals } }: { field: Entr
       : `${formatNumber(usualLow, decimals)} to ${formatNumber(usualHigh, decimals)}`;
   return (
     <>
-      {last === null ? 'not measured yet' : (
+      {last === null ? (
+        'not measured yet'
+      ) : (
         <>
           last <span className="figure">{last.text}</span>, {last.age}
         </>
@@ -113,10 +115,14 @@ function Echo({ field, written }: { field: EntryField; written: WrittenResult })
   const remark = checked.qualifier === '' ? unusualRemark(inField, field) : null;
   const [canonical] = QUANTITIES[field.quantity].units;
   const parts = [
-    ...(checked.qualifier === '' ? [] : [QUALIFIER_OPTIONS.find(({ value }) => value === checked.qualifier)?.label]),
+    ...(checked.qualifier === ''
+      ? []
+      : [QUALIFIER_OPTIONS.find(({ value }) => value === checked.qualifier)?.label]),
     ...(canonical.label === field.unit
       ? []
-      : [`= ${formatNumber(checked.value, QUANTITIES[field.quantity].decimals)} ${canonical.label}`]),
+      : [
+          `= ${formatNumber(checked.value, QUANTITIES[field.quantity].decimals)} ${canonical.label}`,
+        ]),
   ];
   if (parts.length === 0 && remark === null) return null;
   return (

@@ -121,7 +121,14 @@ export function SampleForm({
               <ResultField
                 key={field.quantity}
                 field={field}
-                written={results[index] ?? { quantity: field.quantity, text: '', qualifier: '', unit: field.unit }}
+                written={
+                  results[index] ?? {
+                    quantity: field.quantity,
+                    text: '',
+                    qualifier: '',
+                    unit: field.unit,
+                  }
+                }
                 textField={form.register(`results.${index}.text`)}
                 qualifierField={form.register(`results.${index}.qualifier`)}
                 problem={errors.results?.[index]?.text?.message}
