@@ -11,12 +11,18 @@ export default defineConfig({
         resolve: { alias },
         test: {
           name: 'unit',
-          include: ['tests/{engine,lib,components,architecture,docker-free-scripts}/**/*.test.{ts,tsx}'],
+          include: [
+            'tests/{engine,lib,components,architecture,docker-free-scripts}/**/*.test.{ts,tsx}',
+          ],
         },
       },
       {
         resolve: { alias },
-        test: { name: 'db', include: ['tests/db/**/*.test.ts'], globalSetup: ['tests/support/database-template.ts'] },
+        test: {
+          name: 'db',
+          include: ['tests/db/**/*.test.ts'],
+          globalSetup: ['tests/support/database-template.ts'],
+        },
       },
       {
         resolve: { alias },

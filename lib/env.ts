@@ -3,7 +3,10 @@ import { z } from 'zod';
 const environment = z.object({
   DATABASE_URL: z.url(),
   NODE_ENV: z.enum(['development', 'production', 'test']).default('development'),
-  NEXTAUTH_SECRET: z.string().min(32, 'NEXTAUTH_SECRET must have at least 32 characters').optional(),
+  NEXTAUTH_SECRET: z
+    .string()
+    .min(32, 'NEXTAUTH_SECRET must have at least 32 characters')
+    .optional(),
   LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('info'),
 });
 

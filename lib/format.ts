@@ -43,7 +43,9 @@ export const formatDay = (at: Date, timeZone: string): string =>
   formatter(timeZone, { day: 'numeric', month: 'short', year: 'numeric' }).format(at);
 
 export const formatWeekday = (at: Date, timeZone: string): string =>
-  formatter(timeZone, { weekday: 'long', day: 'numeric', month: 'long', year: 'numeric' }).format(at);
+  formatter(timeZone, { weekday: 'long', day: 'numeric', month: 'long', year: 'numeric' }).format(
+    at,
+  );
 
 export const formatTime = (at: Date, timeZone: string): string =>
   formatter(timeZone, { hour: '2-digit', minute: '2-digit' }).format(at);

@@ -7,7 +7,8 @@ export const paths = {
   samples: (org: string, plant: string) => `/${org}/plants/${plant}/samples`,
   newSample: (org: string, plant: string, point?: string) =>
     `/${org}/plants/${plant}/samples/new${point === undefined ? '' : `?point=${point}`}`,
-  sample: (org: string, plant: string, sample: string) => `/${org}/plants/${plant}/samples/${sample}`,
+  sample: (org: string, plant: string, sample: string) =>
+    `/${org}/plants/${plant}/samples/${sample}`,
   plans: (org: string, plant: string) => `/${org}/plants/${plant}/plans`,
   newPlan: (org: string, plant: string, sample: string) =>
     `/${org}/plants/${plant}/plans/new?sample=${sample}`,
