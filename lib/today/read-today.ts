@@ -12,7 +12,8 @@ import type { Actor } from '@/lib/auth/door';
 import type { Clock } from '@/lib/clock';
 import type { Plant, PointQuantity, SamplingPoint, Target } from '@/lib/plants/schema';
 import { describeAt, isSeriesKey, writeValue } from '@/lib/samples/describe';
-import { dueState, judge } from './rules';
+import { judge } from '@/lib/plants/judge';
+import { dueState } from './rules';
 import type { Reading, Station, Today } from './schema';
 
 const NOTES_SHOWN = 3;

@@ -1,14 +1,3 @@
-import type { Target } from '@/lib/plants/schema';
-
-export type Verdict = 'within' | 'below' | 'above';
-
-/** A value against its target, both in the canonical unit. An open end is never missed. */
-export function judge(value: number, target: Pick<Target, 'lowest' | 'highest'>): Verdict {
-  if (target.lowest !== null && value < target.lowest) return 'below';
-  if (target.highest !== null && value > target.highest) return 'above';
-  return 'within';
-}
-
 export interface Due {
   readonly state: 'done' | 'soon' | 'overdue';
   /** When the next sample is due; null where none was ever taken. */

@@ -1,6 +1,7 @@
 import type { Description, SeriesKey } from '@/lib/samples/describe';
 import type { DosingPoint, PointKind, ShiftNote, Target, TrainStepKind } from '@/lib/plants/schema';
-import type { Due, Verdict } from './rules';
+import type { Verdict } from '@/lib/plants/judge';
+import type { Due } from './rules';
 
 /** One value at one point as the plant line shows it. */
 export interface Reading {

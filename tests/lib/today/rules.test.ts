@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { dueState, judge } from '@/lib/today/rules';
+import { judge } from '@/lib/plants/judge';
+import { dueState } from '@/lib/today/rules';
 
 describe('a value against its target', () => {
   it.each([
