@@ -67,6 +67,8 @@ export interface Water {
   readonly speciesMolKg: Readonly<Record<string, number>>;
   readonly activities: Readonly<Record<string, number>>;
   readonly saturationIndex: Readonly<Record<string, number>>;
+  /** Solids the last step formed, mol/kg by solid key; negative where a solid dissolved. Absent when none did. */
+  readonly precipitatedMolKg?: Readonly<Record<string, number>>;
   /** Plain sentences: what was absent and counted as zero, what lies outside a constant's range. */
   readonly assumptions: readonly string[];
   readonly evidence: SolveEvidence;
@@ -125,6 +127,8 @@ export type ReagentKey =
 export interface Dose {
   readonly reagent: ReagentKey;
   readonly doseMgL: number;
+  /** Water of hydration of the compound as weighed, mol/mol; without it the reagent's usual one (see REAGENTS). */
+  readonly hydrate?: number;
 }
 
 /** Quantities a dose can be asked to reach. */
@@ -172,6 +176,11 @@ export interface LedgerReaction {
   /** log10 of the activity quotient at equilibrium; equals logK within the solver's tolerance. */
   readonly logQuotient: number;
   readonly source: string;
+  /**
+   * True for a reaction taken to run to its end (a coagulant's hydroxide, chlorine with sulfite). It rests at no
+   * equilibrium, so its quotient is not defined: `logQuotient` then repeats `logK` and is not to be shown.
+   */
+  readonly complete?: boolean;
 }
 
 /** The account of one step: what was added, what reacted, and where every species came to rest (mol/kg). */

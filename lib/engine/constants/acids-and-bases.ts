@@ -1,0 +1,105 @@
+import { at25, byEnthalpy, byExpression, type ConstantRow } from './row';
+
+/** Water, the carbonate system and the weak acids of natural and treated water. */
+export const ACIDS_AND_BASES: readonly ConstantRow[] = [
+  byExpression(
+    'OH-',
+    'H2O = H+ + OH-',
+    -14.0,
+    [-283.971, -0.05069842, 13323.0, 102.24447, -1119669.0],
+    'nordstrom1990',
+    { deltaHKJMol: 55.91 },
+  ),
+  byExpression(
+    'HCO3-',
+    'CO2 + H2O = H+ + HCO3-',
+    -6.352,
+    [-356.3094, -0.06091964, 21834.37, 126.8339, -1684915.0],
+    'plummerBusenberg1982',
+    { obtained: 'read', deltaHKJMol: 9.11 },
+  ),
+  byExpression(
+    'CO3--',
+    'HCO3- = H+ + CO3--',
+    -10.329,
+    [-107.8871, -0.03252849, 5151.79, 38.92561, -563713.9],
+    'plummerBusenberg1982',
+    { obtained: 'read', deltaHKJMol: 14.9 },
+  ),
+  byExpression(
+    'HSO4-',
+    'HSO4- = H+ + SO4--',
+    -1.988,
+    [56.889, -0.006473, -2307.9, -19.8858, 0],
+    'nordstrom1990',
+    { deltaHKJMol: -16.11 },
+  ),
+  byExpression(
+    'H3SiO4-',
+    'H4SiO4 = H+ + H3SiO4-',
+    -9.83,
+    [-302.3724, -0.050698, 15669.69, 108.18466, -1119669.0],
+    'nordstrom1990',
+    { deltaHKJMol: 25.61 },
+  ),
+  byExpression(
+    'H2SiO4--',
+    'H4SiO4 = 2H+ + H2SiO4--',
+    -23.0,
+    [-294.0184, -0.07265, 11204.49, 108.18466, -1119669.0],
+    'nordstrom1990',
+    { deltaHKJMol: 73.64 },
+  ),
+  byExpression(
+    'B(OH)4-',
+    'B(OH)3 + H2O = B(OH)4- + H+',
+    -9.24,
+    [24.3919, 0.012078, -1343.9, -13.2258, 0],
+    'nordstrom1990',
+    { deltaHKJMol: 13.49 },
+  ),
+  byExpression(
+    'NH3',
+    'NH4+ = NH3 + H+',
+    -9.252,
+    [0.6322, -0.001225, -2835.76, 0, 0],
+    'nordstrom1990',
+    {
+      deltaHKJMol: 52.22,
+      note: 'The expression gives -9.244 at 25 °C, nearer to Bates & Pinching 1949 (9.245) than the rounded value.',
+    },
+  ),
+  byExpression(
+    'OCl-',
+    'HOCl = H+ + OCl-',
+    -7.537,
+    [10.0686, -0.0253, -3000.0, 0, 0],
+    'morris1966',
+    { rangeC: [5, 35] },
+  ),
+  byEnthalpy('HS-', 'H2S = H+ + HS-', -6.994, 22.18, 'nordstrom1990', {
+    note: 'Enthalpy used: the expression of the same compilation is 0.05 off its own value at 25 °C.',
+  }),
+  at25('S--', 'HS- = H+ + S--', -12.918, 'ballNordstrom1991', {
+    note: 'Published values run from -12.9 to below -17; sulfide ion is negligible in drinking water either way.',
+  }),
+  byEnthalpy('H3PO4', 'H3PO4 = H+ + H2PO4-', -2.148, -7.95, 'bates1951'),
+  byExpression(
+    'HPO4--',
+    'H2PO4- = H+ + HPO4--',
+    -7.199,
+    [5.9884, -0.020912, -2073.0, 0, 0],
+    'batesAcree1943',
+    {
+      rangeC: [0, 60],
+      note: 'Chosen over -7.207 with a constant enthalpy, which is 0.04 off the phosphate pH standard at 0 °C.',
+    },
+  ),
+  byEnthalpy('PO4---', 'HPO4-- = H+ + PO4---', -12.346, 14.77, 'nordstrom1990'),
+  byExpression('HF', 'H+ + F- = HF', 3.18, [-2.033, 0.012645, 429.01, 0, 0], 'nordstrom1990', {
+    deltaHKJMol: 13.31,
+  }),
+  byEnthalpy('HF2-', 'H+ + 2F- = HF2-', 3.76, 19.04, 'nordstrom1990'),
+  at25('SO3--', 'HSO3- = H+ + SO3--', -7.2, 'smithMartell'),
+  at25('H2SO3', 'H2SO3 = H+ + HSO3-', -1.86, 'smithMartell'),
+];

@@ -1,0 +1,26 @@
+import { HYDROGEN } from '../constants/components';
+import { factorise, substitute } from '../numeric/lu';
+import { solveClosed } from '../speciation/closed';
+import { startOf, totalsOf } from '../speciation/state';
+import type { Water } from '../types';
+
+const MEQ_PER_EQ = 1000;
+
+/**
+ * Buffer intensity, meq/L per unit of pH: strong base needed at constant inorganic carbon and constant everything
+ * else (Van Slyke 1922). Taken from the Jacobian of the solved water, not by differences.
+ */
+export function bufferIntensityOf(water: Water): number {
+  const totals = totalsOf(water);
+  const { workspace, ending } = solveClosed(water.temperatureC, totals, startOf(water));
+  if (!ending.converged) return NaN;
+  const { matrix, right, pivots, stride, sums, scalars, system } = workspace;
+  const size = system.components.length + 1;
+  // The hydrogen row compares ln of acids and bases; at the solution both equal this sum.
+  const side = (sums[0] ?? 0) + (scalars[2] ?? 0) + Math.max(-(totals[HYDROGEN] ?? 0), 0);
+  right.fill(0);
+  right[0] = 1 / side;
+  if (!factorise(matrix, size, stride, pivots)) return NaN;
+  substitute(matrix, size, stride, pivots, right);
+  return (MEQ_PER_EQ * Math.LN10) / (right[0] ?? NaN);
+}

@@ -1,0 +1,84 @@
+import { classOf, type IonClass } from '../activity/ion-class';
+import { COMPONENT_KEYS } from '../constants/components';
+import { SOLIDS, SPECIES, type Entry } from '../constants/table';
+
+/**
+ * The species and solids that can exist with a set of components, laid out for the solver. Column 0 is always H+;
+ * the composition of species i is the run start[i] … start[i + 1] of `column` and `count`.
+ */
+export interface System {
+  /** Index into COMPONENT_KEYS of each column. */
+  readonly components: readonly number[];
+  /** Column of inorganic carbon, −1 when the water holds none. */
+  readonly carbon: number;
+  readonly species: readonly Entry[];
+  readonly charges: Float64Array;
+  readonly start: Int32Array;
+  readonly column: Int32Array;
+  readonly count: Float64Array;
+  /** Moles of H+ in each species over the basis. */
+  readonly hydrogen: Float64Array;
+  readonly classes: readonly IonClass[];
+  readonly classIndex: Int32Array;
+  readonly solids: readonly Entry[];
+}
+
+const compiled = new Map<number, System>();
+
+/** Bit mask of a set of component indices. */
+export const maskOf = (components: readonly number[]): number =>
+  components.reduce((mask, component) => mask | (1 << component), 0);
+
+/** The system of a set of components, laid out once and kept. H+ must be among them. */
+export function systemOf(mask: number): System {
+  const known = compiled.get(mask);
+  if (known) return known;
+  const system = compile(mask);
+  compiled.set(mask, system);
+  return system;
+}
+
+const possible = (entry: Entry, mask: number): boolean =>
+  entry.composition.every((count, component) => count === 0 || (mask & (1 << component)) !== 0);
+
+function compile(mask: number): System {
+  const components = COMPONENT_KEYS.map((_, i) => i).filter((i) => (mask & (1 << i)) !== 0);
+  const columnOf = new Map(components.map((component, column) => [component, column]));
+  const species = SPECIES.filter((entry) => possible(entry, mask));
+  const start = new Int32Array(species.length + 1);
+  const columns: number[] = [];
+  const counts: number[] = [];
+  const classes: IonClass[] = [];
+  const classIndex = new Int32Array(species.length);
+  const names: string[] = [];
+  species.forEach((entry, i) => {
+    entry.composition.forEach((count, component) => {
+      const column = columnOf.get(component);
+      if (count === 0 || column === undefined) return;
+      columns.push(column);
+      counts.push(count);
+    });
+    start[i + 1] = columns.length;
+    const group = classOf(entry.key, entry.charge);
+    const name = JSON.stringify(group);
+    const found = names.indexOf(name);
+    if (found < 0) {
+      names.push(name);
+      classes.push(group);
+    }
+    classIndex[i] = found < 0 ? names.length - 1 : found;
+  });
+  return {
+    components,
+    carbon: columnOf.get(1) ?? -1,
+    species,
+    charges: Float64Array.from(species, (entry) => entry.charge),
+    start,
+    column: Int32Array.from(columns),
+    count: Float64Array.from(counts),
+    hydrogen: Float64Array.from(species, (entry) => entry.composition[0] ?? 0),
+    classes,
+    classIndex,
+    solids: SOLIDS.filter((entry) => possible(entry, mask)),
+  };
+}

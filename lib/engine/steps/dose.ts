@@ -1,0 +1,124 @@
+import { COMPONENT_KEYS } from '../constants/components';
+import { refuse } from '../refusal';
+import { ALUM_HYDRATE, isReagent, REAGENTS, WATER_G_MOL } from '../reagents/catalogue';
+import { checkNumber } from '../speciation/analysis';
+import { solveClosed } from '../speciation/closed';
+import { describe } from '../speciation/describe';
+import { startOf, totalsOf } from '../speciation/state';
+import type { Dose, Refusal, Solved, Water } from '../types';
+import {
+  addSpecies,
+  applyComplete,
+  dechlorinationOf,
+  precipitationOf,
+  type CompleteReaction,
+} from './complete-reactions';
+
+/** Largest dose the engine answers for, mg/L. */
+export const LARGEST_DOSE_MG_L = 100_000;
+/** Components that reactions run to an end may use up exactly; a rest of rounding is none. */
+const ROUNDING = 1e-14;
+
+/** What a dose does before equilibrium: the totals it leaves, what it fed (mol/kg) and what ran to its end. */
+export interface Feeding {
+  readonly totals: Float64Array;
+  readonly fed: Readonly<Record<string, number>>;
+  readonly complete: readonly CompleteReaction[];
+}
+
+/** Refuses an unknown reagent, a dose that is not a number, negative, or absurd. */
+export function checkDose(dose: Dose, path = ''): Refusal | undefined {
+  const at = (field: string) => (path === '' ? field : `${path}.${field}`);
+  if (typeof dose !== 'object' || dose === null)
+    return refuse('badInput', 'A dose is needed.', path);
+  if (typeof dose.reagent !== 'string' || !isReagent(dose.reagent)) {
+    return refuse('badInput', `No reagent is called ${String(dose.reagent)}.`, at('reagent'));
+  }
+  if (typeof dose.doseMgL === 'number' && dose.doseMgL < 0) {
+    return refuse('badInput', 'A dose cannot be negative.', at('doseMgL'));
+  }
+  if (dose.hydrate !== undefined) {
+    const fault = checkNumber(dose.hydrate, at('hydrate'), [0, 30]);
+    if (fault) return fault;
+  }
+  return checkNumber(dose.doseMgL, at('doseMgL'), [0, LARGEST_DOSE_MG_L]);
+}
+
+/** g/mol of the compound as dosed; `hydrate` replaces the usual water of hydration. */
+export function doseMolarMass({ reagent, hydrate }: Pick<Dose, 'reagent' | 'hydrate'>): number {
+  const { molarMassGMol } = REAGENTS[reagent];
+  if (hydrate === undefined) return molarMassGMol;
+  const usual =
+    reagent === 'aluminum-sulfate' ? ALUM_HYDRATE : reagent === 'ferrous-sulfate' ? 7 : 0;
+  return molarMassGMol + (hydrate - usual) * WATER_G_MOL;
+}
+
+/** Puts a (checked) dose into the totals of a water and runs what runs to its end. */
+export function feed(water: Water, dose: Dose): Feeding {
+  const info = REAGENTS[dose.reagent];
+  const moles = dose.doseMgL / (1000 * doseMolarMass(dose));
+  const totals = totalsOf(water);
+  const fed: Record<string, number> = {};
+  for (const [key, count] of Object.entries(info.fed)) {
+    fed[key] = count * moles;
+    addSpecies(totals, key, count * moles);
+  }
+  const complete: CompleteReaction[] = [];
+  if (info.precipitates && moles > 0) {
+    const { solid, molPerMol } = info.precipitates;
+    complete.push(precipitationOf(solid, molPerMol * moles, water.temperatureC));
+  }
+  const chlorine = totals[COMPONENT_KEYS.indexOf('HOCl')] ?? 0;
+  const sulfite = totals[COMPONENT_KEYS.indexOf('SO3')] ?? 0;
+  const destroyed = Math.min(chlorine, sulfite);
+  if (destroyed > 0) complete.push(dechlorinationOf(destroyed));
+  const scale = Float64Array.from(totals, Math.abs);
+  for (const reaction of complete) applyComplete(reaction, totals);
+  totals.forEach((total, component) => {
+    if (component > 0 && total < ROUNDING * (scale[component] ?? 0)) totals[component] = 0;
+  });
+  return { totals, fed, complete };
+}
+
+/**
+ * Adds a dose and finds the new equilibrium in solution, closed to the atmosphere. A metal coagulant's metal leaves
+ * completely as its hydroxide (`precipitatedMolKg`); no other solid forms.
+ */
+export function applyDose(water: Water, dose: Dose): Solved | Refusal {
+  const fault = checkDose(dose);
+  if (fault) return fault;
+  const { totals, complete } = feed(water, dose);
+  const outcome = solveClosed(water.temperatureC, totals, startOf(water));
+  if (!outcome.ending.converged) {
+    return refuse(
+      'notConverged',
+      `No equilibrium was found after this dose (${outcome.ending.why}).`,
+    );
+  }
+  const solved = describe(outcome, totals, water.temperatureC, water.assumptions);
+  const solids = complete.filter((reaction) => reaction.solid !== undefined);
+  if (solids.length === 0) return { ok: true, water: solved };
+  const precipitatedMolKg: Record<string, number> = {};
+  for (const { solid, extentMolKg } of solids) {
+    if (solid !== undefined) precipitatedMolKg[solid] = extentMolKg;
+  }
+  return { ok: true, water: { ...solved, precipitatedMolKg } };
+}
+
+/** Adds doses one after another; every water on the way is returned. The first fault names its place in the list. */
+export function applyDoses(
+  water: Water,
+  doses: readonly Dose[],
+): { readonly ok: true; readonly waters: Water[] } | Refusal {
+  const waters: Water[] = [];
+  let current = water;
+  for (const [i, dose] of doses.entries()) {
+    const fault = checkDose(dose, `${i}`);
+    if (fault) return fault;
+    const solved = applyDose(current, dose);
+    if (!solved.ok) return solved;
+    current = solved.water;
+    waters.push(current);
+  }
+  return { ok: true, waters };
+}
