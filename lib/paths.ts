@@ -4,7 +4,12 @@ export const paths = {
   signIn: '/sign-in',
   organisation: (org: string) => `/${org}`,
   today: (org: string, plant: string) => `/${org}/plants/${plant}`,
-  samples: (org: string, plant: string) => `/${org}/plants/${plant}/samples`,
+  samples: (org: string, plant: string, shown: { point?: string; page?: number } = {}) => {
+    const query = new URLSearchParams();
+    if (shown.point !== undefined) query.set('point', shown.point);
+    if (shown.page !== undefined && shown.page > 1) query.set('page', String(shown.page));
+    return `/${org}/plants/${plant}/samples${query.size === 0 ? '' : `?${query.toString()}`}`;
+  },
   newSample: (org: string, plant: string, point?: string) =>
     `/${org}/plants/${plant}/samples/new${point === undefined ? '' : `?point=${point}`}`,
   sample: (org: string, plant: string, sample: string) =>
