@@ -29,9 +29,7 @@ export function SeriesTable({
       onToggle={(event) => setOpen(event.currentTarget.open)}
     >
       <summary className="flex min-h-touch items-center text-sm text-verdigris">
-        ▸{' '}
-        {points.length === count ? `These ${count} points` : `${points.length} of ${count} points`}{' '}
-        as a table
+        ▸ {pointWords(points.length, count)} as a table
       </summary>
       {isOpen ? (
         <div
@@ -83,4 +81,9 @@ export function SeriesTable({
       ) : null}
     </details>
   );
+}
+
+function pointWords(shown: number, count: number): string {
+  if (shown < count) return `${shown} of ${count} points`;
+  return count === 1 ? 'This one point' : `These ${count} points`;
 }
