@@ -28,6 +28,12 @@ export function formatSignificant(value: number, digits = 3): string {
   return formatNumber(value, Math.max(0, digits - 1 - magnitude));
 }
 
+/** `Al2(SO4)3·14.3H2O` with real subscripts: the digits after an element or a bracket, not the coefficients. */
+export const formatFormula = (ascii: string): string =>
+  ascii.replace(/(?<=[A-Za-z)])\d+/g, (digits) =>
+    [...digits].map((digit) => '₀₁₂₃₄₅₆₇₈₉'[Number(digit)] ?? digit).join(''),
+  );
+
 const dateTimeFormats = new Map<string, Intl.DateTimeFormat>();
 
 function formatter(timeZone: string, options: Intl.DateTimeFormatOptions): Intl.DateTimeFormat {

@@ -28,7 +28,10 @@ export function Ledger({
       <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Ledger of quantities">
         <table className="w-full min-w-136 border-y-2 border-ink">
           <caption className="pb-2 text-left font-head text-xl">
-            Ledger <span className="font-text text-base text-ink-soft">{title}</span>
+            Ledger{' '}
+            <span className="font-text text-base text-ink-soft">
+              <Formula>{title}</Formula>
+            </span>
           </caption>
           <LedgerHead first="Quantity" />
           <tbody>
@@ -59,7 +62,7 @@ export function Ledger({
 }
 
 export function LedgerHead({ first }: { first: string }) {
-  const figure = 'py-1.5 pl-4 text-right text-sm font-normal text-ink-soft';
+  const figure = 'py-1.5 pr-3 pl-4 text-right text-sm font-normal text-ink-soft';
   return (
     <thead>
       <tr className="border-b border-rule-strong">
@@ -97,7 +100,7 @@ export function LedgerLine({
     before === null || equilibrium === null ? null : writeRow(before, equilibrium, decimals);
   const write = (value: number | null | undefined) =>
     value === null || value === undefined ? '–' : formatNumber(value, decimals);
-  const figure = 'figure py-1 pl-4 text-right';
+  const figure = 'figure py-1 pr-3 pl-4 text-right';
   return (
     <tr className="border-b border-rule last:border-b-0 hover:bg-chalk-shade">
       <th scope="row" className="py-1 text-left font-normal">

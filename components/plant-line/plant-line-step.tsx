@@ -1,4 +1,4 @@
-import { formatNumber } from '@/lib/format';
+import { formatFormula, formatNumber } from '@/lib/format';
 import type { DosingPoint } from '@/lib/plants/schema';
 import type { LineStep } from '@/lib/today/schema';
 import { Figure } from '@/components/ui/figure';
@@ -82,7 +82,7 @@ function Dosing({ point }: { point: DosingPoint }) {
             {formatNumber(point.doseMgPerL, point.doseMgPerL < 1 ? 2 : 1)}
           </Figure>{' '}
           <span className="unit">
-            <Formula>{point.doseBasis}</Formula>
+            <Formula>{formatFormula(point.doseBasis)}</Formula>
           </span>
         </>
       )}

@@ -21,7 +21,7 @@ export function Masthead({
         <Link href={paths.organisation(organisation.slug)} className="no-underline">
           <Wordmark />
         </Link>
-        <p className="text-ink-soft">
+        <p className="text-ink-soft max-sm:text-sm">
           {organisation.name}
           {organisation.isDemo ? (
             <span className="ml-3 border border-ochre px-1.5 py-0.5 text-sm whitespace-nowrap text-ochre">
@@ -30,8 +30,8 @@ export function Masthead({
           ) : null}
         </p>
       </div>
-      <div className="screen-only flex flex-wrap items-center">
-        <p className="mr-2 text-sm text-ink-soft">
+      <div className="screen-only flex items-center max-sm:-ml-4">
+        <p className="mr-2 hidden text-sm text-ink-soft sm:block">
           {personName}, {role}
         </p>
         <ThemeSwitch />

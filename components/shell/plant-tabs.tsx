@@ -23,7 +23,7 @@ export function PlantTabs({
               <Link
                 href={paths.today(organisationSlug, slug)}
                 aria-current={isCurrent ? 'true' : undefined}
-                className={`flex min-h-touch items-center border border-b-0 px-4 font-head no-underline ${
+                className={`flex min-h-touch items-center border border-b-0 px-4 font-head no-underline max-sm:px-2.5 ${
                   isCurrent
                     ? 'border-rule-strong bg-chalk-sheet font-semibold text-ink'
                     : 'border-transparent text-ink-soft hover:bg-chalk-shade hover:text-ink'

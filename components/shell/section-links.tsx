@@ -25,7 +25,7 @@ export function SectionLinks() {
               <Link
                 href={href(org, plant)}
                 aria-current={isCurrent ? 'page' : undefined}
-                className={`flex min-h-touch items-center border-b-4 px-3 pt-1 no-underline ${
+                className={`flex min-h-touch items-center border-b-4 px-3 pt-1 no-underline max-[23rem]:px-2 ${
                   isCurrent
                     ? 'border-verdigris font-semibold text-ink'
                     : 'border-transparent text-ink-soft hover:border-rule-strong hover:text-ink'

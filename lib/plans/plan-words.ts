@@ -1,5 +1,5 @@
 import { REAGENTS, type ReagentKey } from '@/lib/engine';
-import { formatNumber } from '@/lib/format';
+import { formatFormula, formatNumber } from '@/lib/format';
 import { TARGET_KEYS, TARGETS } from './quantities';
 
 const isReagent = (key: string): key is ReagentKey => key in REAGENTS;
@@ -9,7 +9,7 @@ export function doseWords({ reagent, doseMgL }: { reagent: string; doseMgL: numb
   const dose = `${formatNumber(doseMgL, 2)} mg/L`;
   if (!isReagent(reagent)) return `${dose} ${reagent}`;
   const { name, doseBasis } = REAGENTS[reagent];
-  return `${dose} ${name} ${doseBasis}`;
+  return `${dose} ${name} ${formatFormula(doseBasis)}`;
 }
 
 /** `pH 8.20`, `total alkalinity 40.0 mg/L as CaCO₃` */

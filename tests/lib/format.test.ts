@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import {
   formatAge,
+  formatFormula,
   formatChange,
   formatDayTime,
   formatNumber,
@@ -50,5 +51,17 @@ describe('times on the screen', () => {
     expect(formatDayTime(new Date('2026-07-01T05:30:00Z'), 'Europe/London')).toBe(
       '1 Jul 2026, 06:30',
     );
+  });
+});
+
+describe('chemical formulas', () => {
+  it.each([
+    ['as Ca(OH)2', 'as Ca(OH)₂'],
+    ['Al2(SO4)3·14.3H2O', 'Al₂(SO₄)₃·14.3H₂O'],
+    ['as Cl2', 'as Cl₂'],
+    ['as product', 'as product'],
+    ['as Ca(OH)₂', 'as Ca(OH)₂'],
+  ])('%s is written %s', (ascii, written) => {
+    expect(formatFormula(ascii)).toBe(written);
   });
 });

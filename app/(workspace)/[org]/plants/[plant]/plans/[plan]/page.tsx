@@ -30,8 +30,8 @@ export default async function PlanPage({
       <PageHeading title={<Formula>{words}</Formula>}>
         <Formula>{`For ${targetWords(plan.targetQuantity, plan.targetValue)}. Saved by ${plan.createdBy} on ${formatDayTime(plan.createdAt, plant.timeZone)}; still a ${plan.status}, not a setting.`}</Formula>
       </PageHeading>
-      <div className="grid gap-x-12 gap-y-6 lg:grid-cols-[minmax(0,1fr)_20rem]">
-        <div className="grid content-start gap-6">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-x-12 gap-y-6 lg:grid-cols-[minmax(0,1fr)_20rem]">
+        <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-6">
           {worked === null ? (
             <Notice tone="act" title="No ledger" role="alert">
               Today’s engine cannot work this plan again from its frozen analysis.

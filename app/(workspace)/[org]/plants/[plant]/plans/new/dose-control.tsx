@@ -2,8 +2,9 @@
 
 import { useId } from 'react';
 import { TextField } from '@/components/forms/text-field';
+import { Formula } from '@/components/ui/formula';
 import { REAGENTS } from '@/lib/engine';
-import { formatNumber } from '@/lib/format';
+import { formatFormula, formatNumber } from '@/lib/format';
 import type { PlanChoice, WorkedPlan } from './plan-choice';
 
 const SLIDER_STEPS = 200;
@@ -26,7 +27,14 @@ export function DoseControl({
   return (
     <div>
       <TextField
-        label={`Dose, mg/L ${REAGENTS[choice.reagent].doseBasis}`}
+        label={
+          <>
+            Dose,{' '}
+            <span className="font-normal">
+              <Formula>{`mg/L ${formatFormula(REAGENTS[choice.reagent].doseBasis)}`}</Formula>
+            </span>
+          </>
+        }
         type="text"
         inputMode="decimal"
         autoComplete="off"

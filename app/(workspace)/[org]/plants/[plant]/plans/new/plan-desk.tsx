@@ -5,7 +5,7 @@ import { DoseCautions } from '@/components/ledger/dose-cautions';
 import { Ledger } from '@/components/ledger/ledger';
 import { Notice } from '@/components/ui/notice';
 import { REAGENTS } from '@/lib/engine';
-import { formatNumber } from '@/lib/format';
+import { formatFormula, formatNumber } from '@/lib/format';
 import type { PlanDeskData } from '@/lib/plans/plan-desk';
 import { solveSample } from '@/lib/samples/solve-sample';
 import { DoseControl } from './dose-control';
@@ -42,8 +42,8 @@ export function PlanDesk({
   const change = (part: Partial<PlanChoice>) => setChoice((current) => ({ ...current, ...part }));
   const reagent = REAGENTS[choice.reagent];
   return (
-    <div className="grid gap-x-12 gap-y-8 lg:grid-cols-[22rem_minmax(0,1fr)]">
-      <div className="grid content-start gap-6">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-x-12 gap-y-8 lg:grid-cols-[22rem_minmax(0,1fr)]">
+      <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-6">
         <TargetControl desk={desk} choice={choice} plan={plan} onChange={change} />
         <SuggestionLine choice={choice} plan={plan} onUse={() => change({ doseText: null })} />
         <DoseControl choice={choice} plan={plan} onChange={change} />
@@ -55,14 +55,14 @@ export function PlanDesk({
           plan={plan}
         />
       </div>
-      <div className="grid content-start gap-6">
+      <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-6">
         {plan.after === null ? (
           <Notice tone="watch" title="No dose to work out yet">
             {plan.problem ?? 'Write a target or a dose.'}
           </Notice>
         ) : (
           <Ledger
-            title={`of ${formatNumber(plan.doseMgL ?? 0, 2)} mg/L ${reagent.name}, ${reagent.doseBasis}`}
+            title={`of ${formatNumber(plan.doseMgL ?? 0, 2)} mg/L ${reagent.name} ${formatFormula(reagent.doseBasis)}`}
             before={solution.water}
             after={plan.after}
             account={plan.account}

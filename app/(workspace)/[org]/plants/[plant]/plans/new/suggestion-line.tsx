@@ -4,7 +4,7 @@ import { Button } from '@/components/ui/button';
 import { Figure } from '@/components/ui/figure';
 import { Notice } from '@/components/ui/notice';
 import { REAGENTS } from '@/lib/engine';
-import { formatNumber } from '@/lib/format';
+import { formatFormula, formatNumber } from '@/lib/format';
 import type { PlanChoice, WorkedPlan } from './plan-choice';
 
 /** The engine's answer in words: the dose, both doses where two meet the target, or why none does. */
@@ -32,7 +32,7 @@ export function SuggestionLine({
     <div role="status" className="border-y-2 border-verdigris py-3">
       <p className="log-label">Suggested dose</p>
       <p className="text-3xl">
-        <Figure unit={`mg/L ${doseBasis}`} className="font-semibold">
+        <Figure unit={`mg/L ${formatFormula(doseBasis)}`} className="font-semibold">
           {formatNumber(first?.doseMgL ?? 0, 2)}
         </Figure>
       </p>

@@ -52,7 +52,7 @@ export default async function SamplePage({
       >
         Entered by {sample.enteredBy} on {formatDayTime(sample.enteredAt, plant.timeZone)}.
       </PageHeading>
-      <div className="grid gap-x-12 gap-y-8 lg:grid-cols-2">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-x-12 gap-y-8 lg:grid-cols-2">
         <section aria-labelledby="results">
           <h2 id="results" className="text-xl">
             Results, as written

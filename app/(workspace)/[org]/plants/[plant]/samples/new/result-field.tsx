@@ -10,11 +10,11 @@ import type { EntryField } from '@/lib/samples/entry-sheet';
 import { fromCanonical, QUANTITIES } from '@/lib/samples/quantities';
 
 const QUALIFIER_OPTIONS = [
-  { value: '', label: 'as measured' },
-  { value: '<', label: '< less than' },
-  { value: '>', label: '> more than' },
-  { value: 'nd', label: 'not detected at' },
-  { value: 'e', label: 'estimated' },
+  { value: '', label: '=', words: 'as measured' },
+  { value: '<', label: '<', words: 'less than' },
+  { value: '>', label: '>', words: 'more than' },
+  { value: 'nd', label: 'n.d.', words: 'not detected, limit' },
+  { value: 'e', label: 'est.', words: 'estimated' },
 ] as const;
 
 /** One line of the sheet: unit in the label, qualifier apart, last value and usual range beside, echo beneath. */
@@ -31,7 +31,7 @@ export function ResultField({
   qualifierField: UseFormRegisterReturn;
   problem?: string;
 }) {
-  const { quantity, label, unit, last } = field;
+  const { quantity, label, unit } = field;
   const id = `result-${quantity}`;
   const hasUnit = unit !== label;
   return (
@@ -56,18 +56,17 @@ export function ResultField({
             inputMode={quantity === 'temperature' ? 'text' : 'decimal'}
             autoComplete="off"
             spellCheck={false}
-            placeholder={last?.text}
             aria-invalid={problem !== undefined}
             aria-describedby={`${id}-aside${problem === undefined ? '' : ` ${id}-problem`}`}
-            className={`figure placeholder:opacity-60 ${inputClass(problem !== undefined)} text-right`}
+            className={`figure ${inputClass(problem !== undefined)} text-right`}
           />
           <select
             {...qualifierField}
             aria-label={`${label}, qualifier`}
-            className="min-h-touch w-20 shrink-0 border border-l-0 border-rule-strong bg-chalk px-1 text-sm"
+            className="min-h-touch w-16 shrink-0 border border-l-0 border-rule-strong bg-chalk px-1 text-sm"
           >
             {QUALIFIER_OPTIONS.map((option) => (
-              <option key={option.value} value={option.value}>
+              <option key={option.value} value={option.value} aria-label={option.words}>
                 {option.label}
               </option>
             ))}
@@ -117,7 +116,7 @@ function Echo({ field, written }: { field: EntryField; written: WrittenResult })
   const parts = [
     ...(checked.qualifier === ''
       ? []
-      : [QUALIFIER_OPTIONS.find(({ value }) => value === checked.qualifier)?.label]),
+      : [QUALIFIER_OPTIONS.find(({ value }) => value === checked.qualifier)?.words]),
     ...(canonical.label === field.unit
       ? []
       : [

@@ -97,7 +97,7 @@ export function SampleForm({
       onSubmit={(event) => void save(event)}
       onKeyDown={moveOrSave}
       noValidate
-      className="grid gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,1fr)_22rem]"
+      className="grid grid-cols-[minmax(0,1fr)] gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,1fr)_22rem]"
     >
       <div>
         <ProblemSummary
