@@ -11,3 +11,4 @@ export { precipitationPotentialAt } from './solids/precipitation-potential';
 export { applyDose, applyDoses } from './steps/dose';
 export { doseForTarget } from './planning/dose-for-target';
 export { accountFor } from './ledger/account-for';
+export { convert, UNITS, type Converted, type QuantityKind, type UnitOf } from './units';

@@ -18,6 +18,8 @@ export interface Entry {
   readonly charge: number;
   /** Moles of each component (order of COMPONENT_KEYS) in one mole; H+ may be negative. */
   readonly composition: Float64Array;
+  /** Bit per component it holds. */
+  readonly mask: number;
   /** Absent for the basis species of a component. */
   readonly row?: ConstantRow;
   readonly coefficients?: Coefficients;
@@ -34,7 +36,8 @@ const SOLID_ROWS: readonly ConstantRow[] = [...SOLIDS_OF_HARDNESS, ...SOLIDS_OF_
 const basisEntries: readonly Entry[] = COMPONENT_KEYS.map((component, column) => {
   const composition = new Float64Array(COMPONENT_KEYS.length);
   composition[column] = 1;
-  return { key: COMPONENTS[component], charge: chargeOf(COMPONENTS[component]), composition };
+  const key = COMPONENTS[component];
+  return { key, charge: chargeOf(key), composition, mask: 1 << column };
 });
 
 /** Composition of the defined key from the composition of everything else in its reaction. */
@@ -51,7 +54,8 @@ function compose(row: ConstantRow, term: string, known: ReadonlyMap<string, Entr
       composition[column] = (composition[column] ?? 0) - (coefficient / own) * count;
     });
   }
-  return { key: row.key, charge: chargeOf(row.key), composition, row, coefficients };
+  const mask = composition.reduce((bits, n, column) => (n === 0 ? bits : bits | (1 << column)), 0);
+  return { key: row.key, charge: chargeOf(row.key), composition, mask, row, coefficients };
 }
 
 function composeAqueous(): readonly Entry[] {

@@ -1,5 +1,5 @@
 import { findRoot } from '../numeric/root';
-import { CARBON, HYDROGEN } from '../constants/components';
+import { HYDROGEN } from '../constants/components';
 import type { Start } from './start';
 import { startFrom } from './state';
 import { CLOSED, solveConditions, type Outcome } from './solve';
@@ -60,6 +60,3 @@ function bracketed(temperatureC: number, totals: Float64Array): Outcome {
     ending: { ...last.ending, iterations: iterations + last.ending.iterations },
   };
 }
-
-/** Whether a set of totals holds inorganic carbon at all. */
-export const holdsCarbon = (totals: Float64Array): boolean => (totals[CARBON] ?? 0) > 0;

@@ -53,6 +53,7 @@ export function solveByNewton(workspace: Workspace, problem: Problem, limit = 40
     }
     halvings = 0;
     bestGap = gap;
+    if (gap < FAR) workspace.ionicBound = Infinity;
     previous = residual;
     if (!factorise(matrix, size, stride, pivots)) {
       return { converged: false, why: 'singular', iterations, residual };

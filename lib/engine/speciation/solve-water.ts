@@ -8,7 +8,9 @@ import { solveClosed } from './closed';
 import { describe } from './describe';
 import { constantsAt } from './equilibrium-constants';
 import { solveConditions, type Outcome } from './solve';
-import { foundTotals } from './state';
+import type { Start } from './start';
+import { foundTotals, startFrom } from './state';
+import type { Workspace } from './workspace';
 
 const HELD: Problem = { hydrogenRow: 'held', carbonRow: 'carbon' };
 /** An alkalinity this far below what the pH alone explains is still read as "no inorganic carbon", eq/kg (0.05 mg/L). */
@@ -68,15 +70,6 @@ function withPressure(checked: CheckedAnalysis, pressureAtm: number): Solved | R
   const { temperatureC, totals, given } = checked;
   const lnCarbonDioxide =
     Math.log(pressureAtm) + Math.LN10 * constantsAt(temperatureC).carbonDioxide;
-  if (given.inorganicCarbonMgLC !== undefined) {
-    if ((totals[CARBON] ?? 0) <= Math.exp(lnCarbonDioxide)) {
-      return refuse(
-        'badInput',
-        'At this CO2 pressure dissolved CO2 alone exceeds the inorganic carbon given.',
-        'inorganicCarbonMgLC',
-      );
-    }
-  }
   const problem: Problem = {
     carbonRow: 'held',
     hydrogenRow:
@@ -88,6 +81,13 @@ function withPressure(checked: CheckedAnalysis, pressureAtm: number): Solved | R
   };
   const held = given.pH === undefined ? {} : { lnHydrogen: -given.pH * Math.LN10 };
   const outcome = solveConditions({ temperatureC, totals, problem, lnCarbonDioxide, ...held });
+  if (problem.hydrogenRow === 'carbon' && !(outcome.ending.converged && acidWithinRange(outcome))) {
+    return refuse(
+      'badInput',
+      'At this CO2 pressure dissolved CO2 alone exceeds the inorganic carbon given.',
+      'inorganicCarbonMgLC',
+    );
+  }
   const known = given.alkalinityMgLCaCO3 !== undefined;
   return finish(checked, outcome, foundTotals(outcome.workspace, totals, known));
 }
@@ -111,9 +111,26 @@ function withPHAndAlkalinity(checked: CheckedAnalysis, pH: number): Solved | Ref
     ]);
   }
   const problem: Problem = { hydrogenRow: 'held', carbonRow: 'alkalinity' };
-  const outcome = solveConditions({ temperatureC, totals, problem, lnHydrogen });
+  const conditions = { temperatureC, totals, problem, lnHydrogen };
+  const start = startWithCarbonate(bare.workspace, carbonate, temperatureC);
+  const warm = solveConditions({ ...conditions, start });
+  const outcome = warm.ending.converged ? warm : solveConditions(conditions);
   return finish(checked, outcome, foundTotals(outcome.workspace, totals, true));
 }
+
+/** The carbonate-free state with the CO2 that the missing alkalinity asks for, complexes left out. */
+function startWithCarbonate(bare: Workspace, carbonate: number, temperatureC: number): Start {
+  const { species } = constantsAt(temperatureC);
+  const start = startFrom(bare);
+  const lnH = start.lnActivity[HYDROGEN] ?? 0;
+  const k1 = Math.exp(Math.LN10 * (species.get('HCO3-') ?? 0) - lnH);
+  const k2 = Math.exp(Math.LN10 * (species.get('CO3--') ?? 0) - 2 * lnH);
+  start.lnActivity[CARBON] = Math.log(carbonate / (k1 + 2 * k2));
+  return { ...start, ionicStrengthMolKg: start.ionicStrengthMolKg + carbonate / 2 };
+}
+
+const acidWithinRange = ({ workspace }: Outcome): boolean =>
+  (workspace.unknowns[HYDROGEN] ?? Infinity) < Math.LN10 / 2;
 
 function finish(
   checked: CheckedAnalysis,

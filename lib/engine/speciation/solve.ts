@@ -1,6 +1,5 @@
 import { COMPONENT_KEYS, CARBON, HYDROGEN } from '../constants/components';
 import type { Problem } from './assemble';
-import { constantsAt } from './equilibrium-constants';
 import { solveByNewton, type Ending } from './newton';
 import { guess, resume, settle, type Start } from './start';
 import { systemOf } from './system';
@@ -32,7 +31,7 @@ export const CLOSED: Problem = { hydrogenRow: 'alkalinity', carbonRow: 'carbon' 
 export function solveConditions(conditions: Conditions): Outcome {
   const workspace = prepare(conditions);
   if (conditions.start) resume(workspace, conditions.totals, conditions.start);
-  else guess(workspace, conditions, constantsAt(conditions.temperatureC));
+  else guess(workspace, conditions);
   holdGiven(workspace, conditions);
   if (!conditions.start) settle(workspace, conditions.problem.carbonRow !== 'carbon');
   return { ending: solveByNewton(workspace, conditions.problem), workspace };

@@ -1,7 +1,6 @@
 import { COMPONENT_KEYS, COMPONENTS, CARBON, HYDROGEN } from '../constants/components';
 import { chargeOf } from '../constants/notation';
 import type { Problem } from './assemble';
-import type { ConstantsAt } from './equilibrium-constants';
 import { evaluate } from './evaluate';
 import type { Workspace } from './workspace';
 
@@ -20,110 +19,158 @@ export interface Guess {
   readonly lnCarbonDioxide?: number;
 }
 
-const BASIS_CHARGE_SQUARED = Float64Array.from(
-  COMPONENT_KEYS,
-  (key) => chargeOf(COMPONENTS[key]) ** 2,
-);
+const CHARGE_SQUARED = Float64Array.from(COMPONENT_KEYS, (k) => chargeOf(COMPONENTS[k]) ** 2);
 const LEAST_IONIC = 1e-7;
 /** While Newton is still far off, ionic strength is kept below this many times the first guess. */
 const IONIC_ROOM = 3;
-const BISECTIONS = 24;
-const SWEEPS = 4;
-/** A sum this many times its total (natural log) is brought down before Newton starts. */
-const TOO_MUCH = 1;
+/** pH is bisected from 16 down to −1 this often: to 0.02, as near as a guess without activities deserves. */
+const BISECTIONS = 10;
+const SWEEPS = 12;
+/** A sum this far from its total (natural log) is brought near before Newton starts. */
+const FAR = 1;
 
 /**
- * A first guess into the unknowns: every total as if free, pH from water and carbonate alone, ionic strength from
- * the totals. Constants are taken as they stand, without activity corrections.
+ * A first guess into the unknowns: pH from water and every component with its own acids and hydroxides, then each
+ * component's share that is free, ionic strength from the totals. Constants are taken without activity corrections,
+ * complexes between components are left out.
  */
-export function guess(workspace: Workspace, given: Guess, constants: ConstantsAt): void {
-  const { system, unknowns } = workspace;
+export function guess(workspace: Workspace, given: Guess): void {
+  const { system, unknowns, totals } = workspace;
   const m = system.components.length;
-  let ionic = 0.5 * Math.abs(given.totals[HYDROGEN] ?? 0);
-  for (let column = 1; column < m; column++) {
-    const component = system.components[column] as number;
-    const total = given.totals[component] as number;
-    unknowns[column] = Math.log(Math.max(total, Number.MIN_VALUE));
-    ionic += 0.5 * (BASIS_CHARGE_SQUARED[component] as number) * total;
-  }
-  const k1 = 10 ** (constants.species.get('HCO3-') ?? NaN);
-  const k12 = 10 ** (constants.species.get('CO3--') ?? NaN);
-  const kw = 10 ** (constants.species.get('OH-') ?? NaN);
-  const alkalinity = -(given.totals[HYDROGEN] ?? 0);
-  const carbon = given.totals[CARBON] ?? 0;
-  const pressure = given.lnCarbonDioxide === undefined ? 0 : Math.exp(given.lnCarbonDioxide);
-  const lnH = given.lnHydrogen ?? bisect(excess);
+  const lnH = given.lnHydrogen ?? bisectHydrogen(workspace, given);
   unknowns[HYDROGEN] = lnH;
-  const h = Math.exp(lnH);
-  ionic += 0.5 * (h + kw / h);
-  if (system.carbon > 0) {
-    const one = k1 / h;
-    const two = k12 / (h * h);
-    let free = carbon / (1 + one + two);
-    if (given.lnCarbonDioxide !== undefined) free = pressure;
-    else if (given.problem.carbonRow === 'alkalinity') {
-      const bound = alkalinity - kw / h + h;
-      free = Math.max(bound, 1e-9 * (Math.abs(alkalinity) + h)) / (one + 2 * two);
-    }
-    unknowns[system.carbon] = Math.log(free);
-    ionic += 0.5 * free * (one + 4 * two);
+  let ionic = 0.5 * Math.abs(totals[HYDROGEN] as number);
+  ionic += 0.5 * Math.abs(hydrogenSum(workspace, HYDROGEN, lnH)) + Math.exp(lnH);
+  for (let j = 1; j < m; j++) {
+    const total = totals[j] as number;
+    unknowns[j] = Math.log(total / freeDivisor(workspace, j, lnH));
+    ionic += 0.5 * (CHARGE_SQUARED[system.components[j] as number] as number) * total;
   }
+  if (system.carbon > 0) ionic += guessCarbon(workspace, given, lnH);
   unknowns[m] = Math.max(ionic, LEAST_IONIC);
   workspace.ionicBound = IONIC_ROOM * (unknowns[m] as number);
-
-  /** Rises with h: positive when h is too high. */
-  function excess(h: number): number {
-    const one = k1 / h;
-    const two = k12 / (h * h);
-    if (given.problem.hydrogenRow === 'carbon') return carbon - pressure * (1 + one + two);
-    const free = given.lnCarbonDioxide === undefined ? carbon / (1 + one + two) : pressure;
-    return alkalinity - free * (one + 2 * two) - kw / h + h;
-  }
 }
 
-function bisect(excess: (h: number) => number): number {
-  let low = -15 * Math.LN10;
+/** ln a(CO2) where the total does not give it; returns the ionic strength of its ions, mol/kg. */
+function guessCarbon(workspace: Workspace, given: Guess, lnH: number): number {
+  const { system, unknowns, totals } = workspace;
+  const carbon = system.carbon;
+  const hydrogenPer = hydrogenSum(workspace, carbon, lnH);
+  if (given.lnCarbonDioxide !== undefined) {
+    unknowns[carbon] = given.lnCarbonDioxide;
+  } else if (given.problem.carbonRow === 'alkalinity') {
+    const rest = -(totals[HYDROGEN] as number) + otherHydrogen(workspace, lnH);
+    const least = 1e-9 * (Math.abs(totals[HYDROGEN] as number) + Math.exp(lnH));
+    unknowns[carbon] = Math.log(Math.max(rest, least) / -hydrogenPer);
+  }
+  return -hydrogenPer * Math.exp(unknowns[carbon] as number);
+}
+
+/** Σ K·h^n over a component's own species: total over free. */
+function freeDivisor({ system, lnK }: Workspace, column: number, lnH: number): number {
+  let sum = 0;
+  const to = system.aloneStart[column + 1] as number;
+  for (let p = system.aloneStart[column] as number; p < to; p++) {
+    const i = system.alone[p] as number;
+    sum += Math.exp((lnK[i] as number) + (system.hydrogen[i] as number) * lnH);
+  }
+  return sum;
+}
+
+/** Σ n·K·h^n over a component's own species: H+ bound per free component (column 0: in water itself). */
+function hydrogenSum({ system, lnK }: Workspace, column: number, lnH: number): number {
+  let sum = 0;
+  const to = system.aloneStart[column + 1] as number;
+  for (let p = system.aloneStart[column] as number; p < to; p++) {
+    const i = system.alone[p] as number;
+    const n = system.hydrogen[i] as number;
+    sum += n * Math.exp((lnK[i] as number) + n * lnH);
+  }
+  return sum;
+}
+
+/** H+ over the basis held by everything but inorganic carbon. */
+function otherHydrogen(workspace: Workspace, lnH: number): number {
+  const { system, totals } = workspace;
+  let sum = hydrogenSum(workspace, HYDROGEN, lnH);
+  for (let j = 1; j < system.components.length; j++) {
+    const runs = (system.aloneStart[j + 1] as number) - (system.aloneStart[j] as number);
+    if (j === system.carbon || runs < 2) continue;
+    const free = (totals[j] as number) / freeDivisor(workspace, j, lnH);
+    sum += free * hydrogenSum(workspace, j, lnH);
+  }
+  return sum;
+}
+
+function bisectHydrogen(workspace: Workspace, given: Guess): number {
+  let low = -16 * Math.LN10;
   let high = Math.LN10;
   for (let i = 0; i < BISECTIONS; i++) {
     const middle = 0.5 * (low + high);
-    if (excess(Math.exp(middle)) > 0) high = middle;
+    if (excess(workspace, given, middle) > 0) high = middle;
     else low = middle;
   }
   return 0.5 * (low + high);
+}
+
+/** Rises with h: positive where h is too high. */
+function excess(workspace: Workspace, given: Guess, lnH: number): number {
+  const { carbon } = workspace.system;
+  const pressed = given.lnCarbonDioxide;
+  if (given.problem.hydrogenRow === 'carbon') {
+    const held = Math.exp(pressed ?? 0) * freeDivisor(workspace, carbon, lnH);
+    return (given.totals[CARBON] ?? 0) - held;
+  }
+  let sum = otherHydrogen(workspace, lnH) - (given.totals[HYDROGEN] ?? 0);
+  if (carbon > 0) {
+    const free =
+      pressed === undefined
+        ? (given.totals[CARBON] ?? 0) / freeDivisor(workspace, carbon, lnH)
+        : Math.exp(pressed);
+    sum += free * hydrogenSum(workspace, carbon, lnH);
+  }
+  return sum;
 }
 
 /** Unknowns from an earlier state; components it did not hold start as if free. */
 export function resume(workspace: Workspace, totals: Float64Array, start: Start): void {
   const { system, unknowns } = workspace;
   const m = system.components.length;
+  const lnH = start.lnActivity[HYDROGEN] as number;
   for (let column = 0; column < m; column++) {
     const component = system.components[column] as number;
     const lnActivity = start.lnActivity[component] as number;
-    const total = Math.max(totals[component] as number, Number.MIN_VALUE);
-    unknowns[column] = Number.isFinite(lnActivity) ? lnActivity : Math.log(total);
+    const known = Number.isFinite(lnActivity);
+    unknowns[column] = known
+      ? lnActivity
+      : Math.log((totals[component] as number) / freeDivisor(workspace, column, lnH));
   }
   unknowns[m] = Math.max(start.ionicStrengthMolKg, LEAST_IONIC);
   workspace.ionicBound = Infinity;
 }
 
 /**
- * Brings down components whose complexes alone exceed their total (aluminium at high pH by ten powers of ten), each
- * along its own diagonal with ionic strength as guessed, so that Newton never sees absurd amounts.
+ * While some component's sum is far from its total (fluoride beside aluminium, say), moves the worst one along its own
+ * diagonal with ionic strength as guessed: descent on a convex function, so that Newton never sees absurd amounts.
  */
 export function settle(workspace: Workspace, carbonHeld: boolean): void {
   const { system, unknowns, sums, totals, products } = workspace;
   const m = system.components.length;
   for (let sweep = 0; sweep < SWEEPS; sweep++) {
     evaluate(workspace);
-    let worst = 0;
+    let worst = FAR;
+    let column = 0;
+    let over = 0;
     for (let j = 1; j < m; j++) {
       if (j === system.carbon && carbonHeld) continue;
-      const sum = sums[j] as number;
-      const over = Math.log(sum / (totals[j] as number));
-      if (Math.abs(over) < TOO_MUCH) continue;
-      worst = Math.max(worst, Math.abs(over));
-      unknowns[j] = (unknowns[j] as number) - (over * sum) / (products[j * m + j] as number);
+      const gap = Math.log((sums[j] as number) / (totals[j] as number));
+      if (Math.abs(gap) <= worst) continue;
+      worst = Math.abs(gap);
+      column = j;
+      over = gap;
     }
-    if (worst === 0) return;
+    if (column === 0) return;
+    const diagonal = (products[column * m + column] as number) / (sums[column] as number);
+    unknowns[column] = (unknowns[column] as number) - over / diagonal;
   }
 }

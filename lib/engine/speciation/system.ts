@@ -20,26 +20,27 @@ export interface System {
   readonly hydrogen: Float64Array;
   readonly classes: readonly IonClass[];
   readonly classIndex: Int32Array;
+  /** Species of one mole of a component and H+ alone: run aloneStart[j] … aloneStart[j + 1] of `alone`, per column. */
+  readonly aloneStart: Int32Array;
+  readonly alone: Int32Array;
   readonly solids: readonly Entry[];
 }
 
+/** Layouts kept; a plant's waters need a handful, a stream of arbitrary ones must not fill the memory. */
+const KEPT = 64;
 const compiled = new Map<number, System>();
 
-/** Bit mask of a set of component indices. */
-export const maskOf = (components: readonly number[]): number =>
-  components.reduce((mask, component) => mask | (1 << component), 0);
-
-/** The system of a set of components, laid out once and kept. H+ must be among them. */
+/** The system of a set of components (bit mask, H+ among them), laid out once and kept while it is in use. */
 export function systemOf(mask: number): System {
   const known = compiled.get(mask);
   if (known) return known;
+  if (compiled.size >= KEPT) compiled.clear();
   const system = compile(mask);
   compiled.set(mask, system);
   return system;
 }
 
-const possible = (entry: Entry, mask: number): boolean =>
-  entry.composition.every((count, component) => count === 0 || (mask & (1 << component)) !== 0);
+const possible = (entry: Entry, mask: number): boolean => (entry.mask & ~mask) === 0;
 
 function compile(mask: number): System {
   const components = COMPONENT_KEYS.map((_, i) => i).filter((i) => (mask & (1 << i)) !== 0);
@@ -68,8 +69,11 @@ function compile(mask: number): System {
     }
     classIndex[i] = found < 0 ? names.length - 1 : found;
   });
+  const { alone, aloneStart } = speciesAlone(components, species);
   return {
     components,
+    alone,
+    aloneStart,
     carbon: columnOf.get(1) ?? -1,
     species,
     charges: Float64Array.from(species, (entry) => entry.charge),
@@ -81,4 +85,18 @@ function compile(mask: number): System {
     classIndex,
     solids: SOLIDS.filter((entry) => possible(entry, mask)),
   };
+}
+
+function speciesAlone(components: readonly number[], species: readonly Entry[]) {
+  const aloneStart = new Int32Array(components.length + 1);
+  const alone: number[] = [];
+  components.forEach((component, column) => {
+    const allowed = 1 | (1 << component);
+    species.forEach((entry, i) => {
+      const among = (entry.mask & ~allowed) === 0;
+      if (among && (column === 0 || entry.composition[component] === 1)) alone.push(i);
+    });
+    aloneStart[column + 1] = alone.length;
+  });
+  return { alone: Int32Array.from(alone), aloneStart };
 }
