@@ -56,7 +56,7 @@ describe('a series of the demo', () => {
     [{ point: 'raw', quantity: 'pH' }, 422, /from/],
     [{ point: 'nowhere', quantity: 'pH', ...TWO_YEARS }, 404, /no such sampling point/],
   ])('answers %j with %d and a sentence', async (query, status, message) => {
-    const answer = await ask(query as Record<string, string>);
+    const answer = await ask(query);
     expect(answer.status).toBe(status);
     const { error } = (await answer.json()) as { error: { message: string } };
     expect(error.message).toMatch(message);

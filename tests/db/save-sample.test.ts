@@ -30,9 +30,7 @@ afterAll(async () => {
 
 const now = () => new Date('2026-12-01T12:00:00Z');
 
-const sheet = (
-  changes: Partial<Parameters<typeof sampleInput.parse>[0] & object> = {},
-): SampleToKeep =>
+const sheet = (changes: object = {}): SampleToKeep =>
   sampleInput.parse({
     plantSlug: 'spring',
     pointSlug: 'raw',

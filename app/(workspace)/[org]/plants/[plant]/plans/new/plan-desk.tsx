@@ -58,7 +58,7 @@ export function PlanDesk({
       <div className="grid grid-cols-[minmax(0,1fr)] content-start gap-6">
         {plan.after === null ? (
           <Notice tone="watch" title="No dose to work out yet">
-            {plan.problem ?? 'Write a target or a dose.'}
+            Choose another reagent or target, or write a dose of your own to see what it does.
           </Notice>
         ) : (
           <Ledger

@@ -29,7 +29,7 @@ export function TargetControl({
   const own = desk.plantTargets.find(({ quantity }) => quantity === choice.quantity);
   const { unit, decimals } = TARGETS[choice.quantity];
   return (
-    <div className="grid gap-4">
+    <div className="grid items-end gap-4 sm:max-lg:grid-cols-3">
       <div>
         <label htmlFor={reagentId} className="block font-semibold">
           Feed
