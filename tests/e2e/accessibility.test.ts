@@ -1,5 +1,5 @@
 import AxeBuilder from '@axe-core/playwright';
-import type { Browser } from 'playwright-core';
+import type { Browser, Cookie } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest';
 import { launchBrowser, openPage } from '../support/browser';
 import { signIn, signInOf } from '../support/sign-in';
@@ -7,9 +7,14 @@ import { signIn, signInOf } from '../support/sign-in';
 const baseUrl = inject('baseUrl');
 const operator = signInOf(inject('signIns'), 'operator');
 let browser: Browser;
+let session: Cookie[];
 
 beforeAll(async () => {
   browser = await launchBrowser();
+  const { page, close } = await openPage(browser, baseUrl);
+  await signIn(page, operator);
+  session = await page.context().cookies();
+  await close();
 });
 afterAll(() => browser.close());
 
@@ -32,7 +37,7 @@ describe.each([
       colorScheme,
       viewport: { width, height: 900 },
     });
-    await signIn(page, operator);
+    await page.context().addCookies(session);
     await page.goto(path);
     await page.waitForLoadState('networkidle');
     // WCAG 2.2 A and AA, by axe's own tags.

@@ -76,7 +76,7 @@ export function TrendControls({
             ))}
           </div>
         </fieldset>
-        <div className="flex gap-3">
+        <div className="flex flex-wrap gap-3">
           <TextField
             label="From"
             type="date"
