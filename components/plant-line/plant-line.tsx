@@ -19,7 +19,7 @@ export function PlantLine({
   now: Date;
 }) {
   const columns = steps
-    .map(({ station }) => (station === null ? 'minmax(5.5rem, 0.8fr)' : 'minmax(9.5rem, 1.3fr)'))
+    .map(({ station }) => (station === null ? 'minmax(7.25rem, 0.8fr)' : 'minmax(9.5rem, 1.3fr)'))
     .join(' ');
   return (
     <ol

@@ -4,8 +4,17 @@ import { paths } from '@/lib/paths';
 import type { Reading, Station } from '@/lib/today/schema';
 import { Formula } from '@/components/ui/formula';
 
-/** The line shows this many; a missed target is always among them (targets lead the list), the rest is one tap away. */
 const READINGS_SHOWN = 6;
+
+/** The line shows a few; a missed target is always among them, the rest is one tap away. */
+function shownReadings(readings: readonly Reading[]): readonly Reading[] {
+  const isMissed = ({ verdict }: Reading) => verdict === 'below' || verdict === 'above';
+  const room = READINGS_SHOWN - readings.filter(isMissed).length;
+  const kept = new Set(
+    readings.filter((reading) => !isMissed(reading)).slice(0, Math.max(0, room)),
+  );
+  return readings.filter((reading) => isMissed(reading) || kept.has(reading));
+}
 
 const VERDICT_WORDS = {
   below: { sign: '▼', word: 'low' },
@@ -44,7 +53,7 @@ export function StationReadings({
         )}
       </p>
       <dl className="gap-x-8 sm:max-xl:columns-2">
-        {station.readings.slice(0, READINGS_SHOWN).map((reading) => (
+        {shownReadings(station.readings).map((reading) => (
           <ReadingLine key={reading.key} reading={reading} isOlder={isOlder(reading, station)} />
         ))}
       </dl>

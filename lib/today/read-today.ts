@@ -18,8 +18,8 @@ import type { Reading, Station, Today } from './schema';
 
 const NOTES_SHOWN = 3;
 const MEMORY_MS = 60 * 86_400_000;
-/** Shown at every point that has them, before the rest of its list; targets come first of all. */
-const ALWAYS_SHOWN = ['pH', 'calciteIndex', 'turbidity', 'alkalinity', 'temperature'] as const;
+/** Shown at every point that has them, after pH and the targets and before the rest of its list. */
+const ALWAYS_SHOWN = ['calciteIndex', 'turbidity', 'alkalinity', 'temperature'] as const;
 
 /** Everything the first screen needs: six queries, however many points the plant has. */
 export async function readToday(actor: Actor, plant: Plant, clock: Clock): Promise<Today> {
@@ -66,6 +66,7 @@ function stationOf(
   const own = quantities.filter(({ pointId }) => pointId === point.id);
   const ownTargets = targets.filter(({ pointId }) => pointId === point.id);
   const order = [
+    'pH',
     ...ownTargets.map(({ quantity }) => quantity),
     ...ALWAYS_SHOWN,
     ...own.map(({ quantity }) => quantity),

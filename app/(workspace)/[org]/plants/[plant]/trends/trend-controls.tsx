@@ -94,34 +94,39 @@ export function TrendControls({
           />
         </div>
       </div>
-      <fieldset>
-        <legend className="font-semibold">
-          Quantities and indices{' '}
-          <span className="text-sm font-normal text-ink-soft">up to {MOST_PANELS} panels</span>
-        </legend>
-        <div className="mt-1 grid grid-cols-1 gap-x-6 min-[24rem]:grid-cols-2 md:grid-cols-3 xl:grid-cols-5">
-          {point.quantities.map(({ key, label }) => {
-            const isOn = quantities.includes(key);
-            return (
-              <label
-                key={key}
-                className="flex min-h-touch cursor-pointer items-center gap-2 leading-tight"
-              >
-                <input
-                  type="checkbox"
-                  checked={isOn}
-                  disabled={!isOn && quantities.length >= MOST_PANELS}
-                  onChange={(event) => toggle(key, event.target.checked)}
-                  className="size-5 shrink-0 accent-verdigris"
-                />
-                <span>
-                  <Formula>{label}</Formula>
-                </span>
-              </label>
-            );
-          })}
-        </div>
-      </fieldset>
+      <details>
+        <summary className="flex min-h-touch flex-wrap items-center gap-x-2">
+          <strong className="text-verdigris">▸ Quantities and indices</strong>
+          <span className="text-sm text-ink-soft">
+            {quantities.length} of at most {MOST_PANELS} panels
+          </span>
+        </summary>
+        <fieldset>
+          <legend className="sr-only">Quantities and indices</legend>
+          <div className="mt-1 grid grid-cols-1 gap-x-6 min-[24rem]:grid-cols-2 md:grid-cols-3 xl:grid-cols-5">
+            {point.quantities.map(({ key, label }) => {
+              const isOn = quantities.includes(key);
+              return (
+                <label
+                  key={key}
+                  className="flex min-h-touch cursor-pointer items-center gap-2 leading-tight"
+                >
+                  <input
+                    type="checkbox"
+                    checked={isOn}
+                    disabled={!isOn && quantities.length >= MOST_PANELS}
+                    onChange={(event) => toggle(key, event.target.checked)}
+                    className="size-5 shrink-0 accent-verdigris"
+                  />
+                  <span>
+                    <Formula>{label}</Formula>
+                  </span>
+                </label>
+              );
+            })}
+          </div>
+        </fieldset>
+      </details>
     </div>
   );
 }
