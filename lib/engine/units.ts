@@ -145,8 +145,9 @@ export type UnitOf<K extends QuantityKind> = keyof (typeof UNITS)[K] & string;
 
 export type Converted = { readonly ok: true; readonly value: number } | Refusal;
 
-/** Digits kept: a value written with up to 14 comes back the same from any unit and back. */
-const DIGITS = 15;
+/** Rounding noise of a conversion in units of the last place. */
+const NOISE = 8;
+const MOST_DIGITS = 11;
 
 /** Converts a written value between two units of the same kind. Refuses unknown kinds and units met at run time. */
 export function convert<K extends QuantityKind>(
@@ -165,9 +166,19 @@ export function convert<K extends QuantityKind>(
   const target = unitOf(kind, to);
   if (!target) return refuse('badInput', `${kind} is not written in ${to}.`, 'to');
   if (from === to) return { ok: true, value };
-  const canonical = value * source.scale + (source.offset ?? 0);
-  const converted = (canonical - (target.offset ?? 0)) / target.scale;
-  return { ok: true, value: Number(converted.toPrecision(DIGITS)) };
+  const offset = (source.offset ?? 0) - (target.offset ?? 0);
+  const converted = (value * source.scale + offset) / target.scale;
+  const size = Math.abs(converted) + Math.abs(offset / target.scale);
+  return { ok: true, value: withoutNoise(converted, NOISE * Number.EPSILON * size) };
+}
+
+/** The shortest decimal within the noise, if it is short: a written value comes back as written. */
+function withoutNoise(value: number, noise: number): number {
+  for (let digits = 1; digits <= MOST_DIGITS; digits++) {
+    const short = Number(value.toPrecision(digits));
+    if (Math.abs(short - value) <= noise) return short;
+  }
+  return value;
 }
 
 function unitOf(kind: QuantityKind, unit: string): Unit | undefined {

@@ -8,7 +8,7 @@ export function waterDensityKgM3(temperatureC: number): number {
     t *
       (16.945176 +
         t * (-7.9870401e-3 + t * (-46.170461e-6 + t * (105.56302e-9 + t * -280.54253e-12))));
-  return numerator / (1 + 16.89785e-3 * t);
+  return numerator / (1 + 16.87985e-3 * t);
 }
 
 /** Relative permittivity of water, 0–100 °C. Malmberg & Maryott 1956, J. Res. NBS 56, 1. */

@@ -43,3 +43,6 @@ export const HYDROGEN = 0;
 export const CARBON = 1;
 
 export const isComponent = (key: string): key is Component => key in COMPONENTS;
+
+/** A total below this holds less than one molecule in a million litres and counts as absent, mol/kg. */
+export const LEAST_TOTAL_MOL_KG = 1e-30;

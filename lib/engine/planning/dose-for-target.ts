@@ -15,6 +15,8 @@ const DOSE_RESOLUTION_MG_L = 1e-9;
 const UNMOVED = 1e-9;
 /** Golden-section steps when a turn between two looks has to be found. */
 const TURN_STEPS = 30;
+/** Where the slope at an end of the span is taken, as a share of the way to the next look. */
+const BESIDE = 1e-3;
 
 interface Point {
   readonly doseMgL: number;
@@ -67,7 +69,10 @@ export function doseForTarget(
   };
 }
 
-/** Adds the highest or lowest point between looks where the value turns towards the target without a look past it. */
+/**
+ * Adds the turns that could hide the target: a peak or trough between looks none of which passes it. A turn shows as
+ * three looks that change direction, or at an end of the span as a slope against the run of the last two looks.
+ */
 function withTurns(
   looks: readonly Point[],
   target: number,
@@ -77,43 +82,54 @@ function withTurns(
   for (let i = 1; i + 1 < looks.length; i++) {
     const [left, middle, right] = [looks[i - 1], looks[i], looks[i + 1]];
     if (!left || !middle || !right) continue;
-    const up = middle.value > left.value && middle.value > right.value;
-    const down = middle.value < left.value && middle.value < right.value;
-    if (!up && !down) continue;
-    const falls = middle.value < target;
-    const hidden = (up && falls) || (down && !falls);
-    if (hidden) points.push(turnBetween(left.doseMgL, right.doseMgL, up, valueAt));
+    const peak = middle.value > left.value && middle.value >= right.value;
+    const trough = middle.value < left.value && middle.value <= right.value;
+    const hidden = (peak && middle.value <= target) || (trough && middle.value >= target);
+    if (hidden) points.push(turnBetween(left.doseMgL, right.doseMgL, peak, target, valueAt));
+  }
+  const ends = [
+    [looks[0], looks[1]],
+    [looks.at(-1), looks.at(-2)],
+  ] as const;
+  for (const [end, inner] of ends) {
+    if (!end || !inner || end === inner) continue;
+    const peak = end.value > inner.value;
+    if (peak ? target < end.value : target > end.value) continue;
+    const beside = valueAt(end.doseMgL + BESIDE * (inner.doseMgL - end.doseMgL));
+    const turns = peak ? beside > end.value : beside < end.value;
+    if (turns) points.push(turnBetween(end.doseMgL, inner.doseMgL, peak, target, valueAt));
   }
   return points.sort((a, b) => a.doseMgL - b.doseMgL);
 }
 
-/** Golden-section search for the turn in (from, to). */
+/** Golden-section search for the turn between two doses; stops early at a value past the target. */
 function turnBetween(
   from: number,
   to: number,
   highest: boolean,
+  target: number,
   valueAt: (doseMgL: number) => number,
 ): Point {
   const sign = highest ? 1 : -1;
   const ratio = (Math.sqrt(5) - 1) / 2;
-  let [low, high] = [from, to];
-  let a = high - ratio * (high - low);
-  let b = low + ratio * (high - low);
-  let [fa, fb] = [sign * valueAt(a), sign * valueAt(b)];
+  const at = (doseMgL: number): Point => ({ doseMgL, value: valueAt(doseMgL) });
+  let [low, high] = [Math.min(from, to), Math.max(from, to)];
+  let a = at(high - ratio * (high - low));
+  let b = at(low + ratio * (high - low));
   for (let i = 0; i < TURN_STEPS; i++) {
-    if (fa > fb) {
-      high = b;
-      [b, fb] = [a, fa];
-      a = high - ratio * (high - low);
-      fa = sign * valueAt(a);
+    const best = sign * a.value > sign * b.value ? a : b;
+    if (sign * best.value > sign * target) return best;
+    if (best === a) {
+      high = b.doseMgL;
+      b = a;
+      a = at(high - ratio * (high - low));
     } else {
-      low = a;
-      [a, fa] = [b, fb];
-      b = low + ratio * (high - low);
-      fb = sign * valueAt(b);
+      low = a.doseMgL;
+      a = b;
+      b = at(low + ratio * (high - low));
     }
   }
-  return fa > fb ? { doseMgL: a, value: sign * fa } : { doseMgL: b, value: sign * fb };
+  return sign * a.value > sign * b.value ? a : b;
 }
 
 function rootsBetween(

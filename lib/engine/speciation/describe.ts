@@ -3,7 +3,13 @@ import {
   CARBON_MG_PER_MOL,
   CO2_MG_PER_MOL,
 } from '../constants/carbonate-equivalents';
-import { COMPONENT_KEYS, COMPONENTS, CARBON, HYDROGEN } from '../constants/components';
+import {
+  COMPONENT_KEYS,
+  COMPONENTS,
+  CARBON,
+  HYDROGEN,
+  LEAST_TOTAL_MOL_KG,
+} from '../constants/components';
 import { chargeOf } from '../constants/notation';
 import type { Water } from '../types';
 import { constantsAt } from './equilibrium-constants';
@@ -59,7 +65,7 @@ function namedTotals(totals: Float64Array): Record<string, number> {
   COMPONENT_KEYS.forEach((key, component) => {
     if (component === HYDROGEN) return;
     const total = totals[component] ?? 0;
-    if (total > 0) named[key] = total;
+    if (total > LEAST_TOTAL_MOL_KG) named[key] = total;
     charge += chargeOf(COMPONENTS[key]) * total;
   });
   named['charge'] = charge;

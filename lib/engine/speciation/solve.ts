@@ -1,4 +1,4 @@
-import { COMPONENT_KEYS, CARBON, HYDROGEN } from '../constants/components';
+import { COMPONENT_KEYS, CARBON, HYDROGEN, LEAST_TOTAL_MOL_KG } from '../constants/components';
 import type { Problem } from './assemble';
 import { solveByNewton, type Ending } from './newton';
 import { guess, resume, settle, type Start } from './start';
@@ -41,7 +41,8 @@ export function solveConditions(conditions: Conditions): Outcome {
 export function prepare(conditions: Conditions): Workspace {
   let mask = 1 << HYDROGEN;
   COMPONENT_KEYS.forEach((_, component) => {
-    if (component !== HYDROGEN && (conditions.totals[component] ?? 0) > 0) mask |= 1 << component;
+    const total = conditions.totals[component] ?? 0;
+    if (component !== HYDROGEN && total > LEAST_TOTAL_MOL_KG) mask |= 1 << component;
   });
   if (conditions.problem.carbonRow !== 'carbon') mask |= 1 << CARBON;
   const system = systemOf(mask);

@@ -48,7 +48,7 @@ export function guess(workspace: Workspace, given: Guess): void {
   }
   if (system.carbon > 0) ionic += guessCarbon(workspace, given, lnH);
   unknowns[m] = Math.max(ionic, LEAST_IONIC);
-  workspace.ionicBound = IONIC_ROOM * (unknowns[m] as number);
+  workspace.ionicBound = IONIC_ROOM * unknowns[m];
 }
 
 /** ln a(CO2) where the total does not give it; returns the ionic strength of its ions, mol/kg. */
