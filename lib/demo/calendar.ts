@@ -10,8 +10,10 @@ export interface CalendarDay {
   readonly daysBeforeEnd: number;
   readonly localDate: string;
   readonly dayOfYear: number;
-  /** Local noon less twelve hours: within the hour of local midnight on the days the clocks change. */
+  /** Local noon less twelve hours: an hour beside local midnight on the days the clocks change. */
   readonly midnightMs: number;
+  /** When the date really begins. */
+  readonly beginsMs: number;
 }
 
 /** The plant-local days up to and including that of `now`, oldest first. */
@@ -23,11 +25,13 @@ export function calendarUpTo(now: Date, days: number, timeZone: string): Calenda
     const localDate = new Date(lastUtcMs - daysBeforeEnd * DAY_MS).toISOString().slice(0, 10);
     const noon = momentFromLocal(`${localDate}T12:00`, timeZone);
     if (noon === null) throw new RangeError(`${localDate} has no noon in ${timeZone}.`);
+    const midnightMs = noon.getTime() - 12 * HOUR_MS;
     return {
       daysBeforeEnd,
       localDate,
       dayOfYear: dayOfYear(localDate),
-      midnightMs: noon.getTime() - 12 * HOUR_MS,
+      midnightMs,
+      beginsMs: momentFromLocal(`${localDate}T00:00`, timeZone)?.getTime() ?? midnightMs,
     };
   });
 }
@@ -50,7 +54,7 @@ export function roundMs(
   const isFresh = plannedMs <= nowMs && plannedMs > nowMs - 4 * HOUR_MS;
   if (day.daysBeforeEnd > 0 || isFresh) return plannedMs;
   return Math.min(
-    Math.max(nowMs - minutesBeforeNow * MINUTE_MS, day.midnightMs + MINUTE_MS),
+    Math.max(nowMs - minutesBeforeNow * MINUTE_MS, day.beginsMs + MINUTE_MS),
     nowMs - MINUTE_MS / 2,
   );
 }

@@ -21,15 +21,17 @@ const CARRIERS: Partial<Record<QuantityKey, Carrier>> = {
 
 /** Conductivity at 25 °C of a water's major ions, µS/cm. */
 export function conductivityUsPerCm(values: Partial<Record<QuantityKey, number>>): number {
-  let ideal = 0;
-  let ionicStrength = 0;
-  for (const [key, carrier] of Object.entries(CARRIERS) as [QuantityKey, Carrier][]) {
-    const meqPerL = (values[key] ?? 0) / carrier.mgPerMeq;
-    ideal += meqPerL * carrier.conductance;
-    ionicStrength += (meqPerL * carrier.charge) / 2000;
-  }
+  const carried = (Object.entries(CARRIERS) as [QuantityKey, Carrier][]).map(([key, carrier]) => ({
+    ...carrier,
+    meqPerL: (values[key] ?? 0) / carrier.mgPerMeq,
+  }));
+  const ionicStrength =
+    carried.reduce((sum, { meqPerL, charge }) => sum + meqPerL * charge, 0) / 2000;
   const root = Math.sqrt(ionicStrength);
-  // The monovalent activity coefficient squared slows the ions down (Standard Methods 2510, from memory).
-  const logActivity = -0.5 * (root / (1 + root) - 0.3 * ionicStrength);
-  return ideal * 10 ** (2 * logActivity);
+  // Onsager's limiting law at 25 °C, ion by ion; its two constants from memory.
+  return carried.reduce(
+    (sum, { meqPerL, charge, conductance }) =>
+      sum + meqPerL * (conductance - charge * (30.2 + 0.229 * conductance) * root),
+    0,
+  );
 }

@@ -14,8 +14,7 @@ export interface SampleBook {
   readonly plantId: string;
   readonly pointIds: ReadonlyMap<string, string>;
   readonly now: Date;
-  /** The person on duty that many days before the end. */
-  readonly onDuty: (daysBeforeEnd: number) => string;
+  readonly onDuty: (momentMs: number) => string;
 }
 
 /** Fills in a sheet for every visit, makes the mistakes, and solves what can be solved. Newest first. */
@@ -32,23 +31,21 @@ export function sampleRows(
     const results = fillSheet(point.quantities, water, own);
     return { pointSlug: point.slug, daysBeforeEnd, takenMs, name, own, results };
   });
-  return withMistakes(book.worksSlug, sheets).map(
-    ({ pointSlug, daysBeforeEnd, takenMs, name, own, results }) => {
-      const enteredMs = takenMs + own.between(12, 55) * MINUTE_MS;
-      return {
-        id: demoId(random, 'sample', name),
-        plantId: book.plantId,
-        pointId: book.pointIds.get(pointSlug) ?? '',
-        clientKey: demoUuid(own),
-        takenAt: new Date(Math.floor(takenMs / MINUTE_MS) * MINUTE_MS),
-        enteredAt: new Date(Math.min(enteredMs, book.now.getTime())),
-        enteredBy: book.onDuty(daysBeforeEnd),
-        comment: '',
-        results,
-        solution: solutionOf(results),
-      };
-    },
-  );
+  return withMistakes(book.worksSlug, sheets).map(({ pointSlug, takenMs, name, own, results }) => {
+    const enteredMs = takenMs + own.between(12, 55) * MINUTE_MS;
+    return {
+      id: demoId(random, 'sample', name),
+      plantId: book.plantId,
+      pointId: book.pointIds.get(pointSlug) ?? '',
+      clientKey: demoUuid(own),
+      takenAt: new Date(Math.floor(takenMs / MINUTE_MS) * MINUTE_MS),
+      enteredAt: new Date(Math.min(enteredMs, book.now.getTime())),
+      enteredBy: book.onDuty(takenMs),
+      comment: '',
+      results,
+      solution: solutionOf(results),
+    };
+  });
 }
 
 function solutionOf(results: readonly DemoResult[]): DemoSolution | null {

@@ -1,6 +1,6 @@
 import { formatNumber } from '@/lib/format';
 import { clockMs } from './calendar';
-import { MIS_FED_WEEK } from './mis-fed-week';
+import { MIS_FED_WEEK } from './mis-fed';
 import type { WorksDay, WorksHistory } from './simulate-works';
 import type { QuantityKey } from '@/lib/samples/quantities';
 
@@ -45,7 +45,7 @@ const LAST_DAYS: Readonly<Record<string, Readonly<Record<number, Entry>>>> = {
       5,
       50,
       (day) =>
-        `Quiet night. Caustic trim at ${dose(day, 'caustic')} mg/L, finished pH steady. CO2 tank to be read this afternoon.`,
+        `Finished pH down to ${read(day, 'finished', 'pH', 1)} with the caustic trim unchanged at ${dose(day, 'caustic')} mg/L; drawdown falls short, strainer suspected. For the day shift to put right and review.`,
     ),
   },
   'sallow-wells': {

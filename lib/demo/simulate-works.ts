@@ -1,5 +1,5 @@
 import { clockMs, MINUTE_MS, type CalendarDay } from './calendar';
-import { isMisFed, MIS_FED_WEEK } from './mis-fed-week';
+import { misFedOn } from './mis-fed';
 import { createWander, type Random } from './random';
 import { runoff } from './rain';
 import { createSource, type Values } from './raw-water';
@@ -64,7 +64,7 @@ export function simulateWorks(
     const raw = nextRaw(day.dayOfYear, wetness[index] ?? 0);
     const yesterday = history.at(-1);
     const overnightMs = clockMs(day, 0, 0) + clock.between(-150, 300) * MINUTE_MS;
-    const misFed = isMisFed(works.slug, day.daysBeforeEnd);
+    const fault = misFedOn(works.slug, day.daysBeforeEnd);
     if (doses === null || yesterday === undefined) {
       doses = change(process.chooseDoses(raw, null), clockMs(day, 0, 0));
     } else if (day.daysBeforeEnd % WEEK_DAYS === WEEK_DAYS - 1) {
@@ -77,7 +77,7 @@ export function simulateWorks(
     const given = (set: Doses): Doses =>
       Object.fromEntries(
         Object.entries(set).map(([key, dose]) => {
-          const share = misFed && key === MIS_FED_WEEK.dosingKey ? MIS_FED_WEEK.shareFed : 1;
+          const share = key === fault?.dosingKey ? fault.shareFed : 1;
           return [key, dose * share * (stray[key] ?? 1)];
         }),
       );
@@ -86,7 +86,7 @@ export function simulateWorks(
       return process.treat(raw, given(set), () => scatter.normal());
     };
     let treated = treat(doses);
-    if (!misFed && process.needsAttention(treated)) {
+    if (fault === undefined && process.needsAttention(treated)) {
       const atMs = Math.min(overnightMs, clockMs(day, 6, 30) - BEFORE_ROUND_MS);
       doses = change(process.chooseDoses(raw, doses), atMs);
       treated = treat(doses);

@@ -68,7 +68,7 @@ export interface WorksProcess {
   readonly sourceMemory: number;
   /** What the people on shift would set for this water; `inForce` is null at the very start. */
   chooseDoses(raw: Values, inForce: Doses | null): Doses;
-  /** The water at each point, by slug, canonical units; network water is yesterday's finished water grown older. */
+  /** The water at each point, by slug, canonical units; network water is the day's finished water grown older. */
   treat(raw: Values, doses: Doses, scatter: Scatter): Readonly<Record<string, Values>>;
   /** Whether the shift would not leave this as it is. */
   needsAttention(treated: Readonly<Record<string, Values>>): boolean;

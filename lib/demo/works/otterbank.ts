@@ -72,7 +72,7 @@ export const OTTERBANK: WorksDefinition = {
         listed('chloride', 'mg/L', 1, [26, 50]),
         listed('sulfate', 'mg/L', 1, [32, 58]),
         listed('nitrate', 'mg/L as N', 1, [2.5, 8]),
-        listed('ammonia', 'mg/L as N', 2, [0.02, 0.3], 0.02),
+        listed('ammonia', 'mg/L as N', 2, [0.04, 0.3], 0.04),
         listed('conductivity', 'µS/cm', 0, [400, 650]),
         listed('turbidity', 'NTU', 1, [3, 150]),
         listed('colour', 'mg/L Pt-Co', 0, [8, 60]),
@@ -93,7 +93,7 @@ export const OTTERBANK: WorksDefinition = {
         listed('iron', 'mg/L', 2, [0.1, 0.9], 0.05),
       ],
       targets: [
-        target('turbidity', [null, 3], 1.5, 'keeps the filters running a full day'),
+        target('turbidity', [null, 2.2], 1.3, 'keeps the filters running a full day'),
         target('iron', [null, 1], null, 'more means that floc is carried over'),
       ],
     },
@@ -125,7 +125,7 @@ export const OTTERBANK: WorksDefinition = {
         listed('freeChlorine', 'mg/L as Cl₂', 2, [0.7, 1.5]),
       ],
       targets: [
-        target('freeChlorine', [0.8, 1.5], 1.1, 'carries the disinfection before ammonia is added'),
+        target('freeChlorine', [0.9, 1.4], 1.1, 'carries the disinfection before ammonia is added'),
       ],
     },
     {

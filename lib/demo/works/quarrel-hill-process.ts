@@ -1,4 +1,4 @@
-import type { Dose, Water } from '@/lib/engine';
+import type { Dose } from '@/lib/engine';
 import { conductivityUsPerCm } from '../conductivity';
 import { doseToReach, fed, valuesOf, waterOf } from '../chemistry';
 import type { Values } from '../raw-water';
@@ -24,15 +24,10 @@ const coagulation = (doses: Doses): Dose[] => [
   { reagent: 'calcium-hydroxide', doseMgL: doseOf(doses, 'pre-lime') },
 ];
 
-function beforeTrim(clarified: Water, doses: Doses, chlorineLeftMgL: number): Water {
-  const hypochlorite = doseOf(doses, 'hypochlorite');
-  return fed(clarified, [
-    ...chlorineDoses('sodium-hypochlorite', hypochlorite, chlorineLeftMgL),
-    { reagent: 'phosphoric-acid', doseMgL: doseOf(doses, 'phosphate') },
-    { reagent: 'calcium-hydroxide', doseMgL: doseOf(doses, 'lime') },
-    { reagent: 'carbon-dioxide', doseMgL: doseOf(doses, 'carbon-dioxide') },
-  ]);
-}
+const disinfection = (doses: Doses, chlorineLeftMgL: number): Dose[] => [
+  ...chlorineDoses('sodium-hypochlorite', doseOf(doses, 'hypochlorite'), chlorineLeftMgL),
+  { reagent: 'phosphoric-acid', doseMgL: doseOf(doses, 'phosphate') },
+];
 
 /** The weekly setting: coagulant by colour, then every alkali and acid to its pH or alkalinity. */
 function chooseDoses(raw: Values, inForce: Doses | null): Doses {
@@ -51,21 +46,30 @@ function chooseDoses(raw: Values, inForce: Doses | null): Doses {
     phosphate: PHOSPHATE_MG_L_H3PO4,
   };
   const clarified = fed(intake, coagulation(first));
-  const withoutLime = beforeTrim(clarified, first, RESIDUAL_MG_L);
-  const lime = doseToReach(withoutLime, 'calcium-hydroxide', {
-    quantity: 'alkalinity',
-    value: ALKALINITY_BEFORE_TRIM_MG_L,
-  });
-  const withLime = { ...first, lime: roundTo(lime, 0.2) };
-  const limed = beforeTrim(clarified, withLime, RESIDUAL_MG_L);
+  const disinfected = fed(clarified, disinfection(first, RESIDUAL_MG_L));
+  const lime = roundTo(
+    doseToReach(disinfected, 'calcium-hydroxide', {
+      quantity: 'alkalinity',
+      value: ALKALINITY_BEFORE_TRIM_MG_L,
+    }),
+    0.2,
+  );
+  const limed = fed(disinfected, [{ reagent: 'calcium-hydroxide', doseMgL: lime }]);
   const carbonDioxide =
     limed.pH > PH_BEFORE_TRIM
-      ? doseToReach(limed, 'carbon-dioxide', { quantity: 'pH', value: PH_BEFORE_TRIM })
+      ? roundTo(
+          doseToReach(limed, 'carbon-dioxide', { quantity: 'pH', value: PH_BEFORE_TRIM }),
+          0.2,
+        )
       : 0;
-  const withGas = { ...withLime, 'carbon-dioxide': roundTo(carbonDioxide, 0.2) };
-  const ready = beforeTrim(clarified, withGas, RESIDUAL_MG_L);
+  const ready = fed(limed, [{ reagent: 'carbon-dioxide', doseMgL: carbonDioxide }]);
   const caustic = doseToReach(ready, 'sodium-hydroxide', { quantity: 'pH', value: FINISHED_PH });
-  const chosen = { ...withGas, caustic: roundTo(caustic, 0.1) };
+  const chosen = {
+    ...first,
+    lime,
+    'carbon-dioxide': carbonDioxide,
+    caustic: roundTo(caustic, 0.1),
+  };
   // The phosphate pump is left alone from week to week.
   return inForce === null ? chosen : { ...chosen, phosphate: doseOf(inForce, 'phosphate') };
 }
@@ -134,8 +138,10 @@ export const QUARREL_HILL_PROCESS: WorksProcess = {
       0.06,
       scatter,
     );
-    const ready = beforeTrim(clarified, doses, left);
-    const finished = fed(ready, [
+    const finished = fed(clarified, [
+      ...disinfection(doses, left),
+      { reagent: 'calcium-hydroxide', doseMgL: doseOf(doses, 'lime') },
+      { reagent: 'carbon-dioxide', doseMgL: doseOf(doses, 'carbon-dioxide') },
       { reagent: 'sodium-hydroxide', doseMgL: doseOf(doses, 'caustic') },
     ]);
     // Alum works best near its own pH; off it, colour, turbidity and aluminium come through.

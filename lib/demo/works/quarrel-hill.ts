@@ -109,7 +109,7 @@ export const QUARREL_HILL: WorksDefinition = {
       ],
       targets: [
         target('pH', [6.0, 6.5], 6.2, 'keeps aluminium and colour at their least together'),
-        target('turbidity', [null, 1.0], 0.6, 'keeps the filters running a full day'),
+        target('turbidity', [null, 0.7], 0.5, 'keeps the filters running a full day'),
       ],
     },
     {
@@ -120,13 +120,13 @@ export const QUARREL_HILL: WorksDefinition = {
       everyH: 24,
       quantities: [
         listed('turbidity', 'NTU', 2, [0.04, 0.2], 0.05),
-        listed('aluminum', 'mg/L', 3, [0.01, 0.08], 0.01),
+        listed('aluminum', 'mg/L', 3, [0.025, 0.08], 0.025),
         listed('colour', 'mg/L Pt-Co', 0, [2, 6], 2),
         listed('uvAbsorbance', '1/cm', 3, [0.01, 0.06]),
       ],
       targets: [
-        target('turbidity', [null, 0.2], 0.1, 'leaves room below the limit at the tap'),
-        target('aluminum', [null, 0.1], null, 'leaves room below the limit at the tap'),
+        target('turbidity', [null, 0.12], 0.08, 'leaves room below the limit at the tap'),
+        target('aluminum', [null, 0.06], null, 'leaves room below the limit at the tap'),
       ],
     },
     {
@@ -149,7 +149,7 @@ export const QUARREL_HILL: WorksDefinition = {
         listed('conductivity', 'µS/cm', 0, [120, 230]),
         listed('turbidity', 'NTU', 2, [0.04, 0.25], 0.05),
         listed('freeChlorine', 'mg/L as Cl₂', 2, [0.4, 0.9]),
-        listed('aluminum', 'mg/L', 3, [0.01, 0.08], 0.01),
+        listed('aluminum', 'mg/L', 3, [0.025, 0.08], 0.025),
         listed('iron', 'mg/L', 3, [0.01, 0.05], 0.01),
       ],
       targets: [
@@ -170,7 +170,7 @@ export const QUARREL_HILL: WorksDefinition = {
         target('phosphate', [0.7, 1.1], 0.9, 'the dose the zone has been held at'),
         target('freeChlorine', [0.4, 0.9], 0.6, 'a residual that reaches the end of the zone'),
         target('turbidity', [null, 0.3], 0.1, 'clear water into the contact tank and out of it'),
-        target('aluminum', [null, 0.1], null, 'little coagulant left to settle in the mains'),
+        target('aluminum', [null, 0.06], null, 'little coagulant left to settle in the mains'),
         target('iron', [null, 0.05], null, 'no discoloured water from the works itself'),
       ],
     },
