@@ -12,7 +12,7 @@ import type { EntrySheet } from '@/lib/samples/entry-sheet';
 import { sampleInput, type SampleInput, type SampleToKeep } from '@/lib/samples/schema';
 import { saveSampleAction } from './actions';
 import { LiveFindings } from './live-findings';
-import { ResultField } from './result-field';
+import { ResultField } from '@/components/forms/result-field';
 
 /** The whole sheet of one sampling point: typed from top to bottom, solved as you type, saved once. */
 export function SampleForm({

@@ -1,8 +1,8 @@
 'use client';
 
 import type { UseFormRegisterReturn } from 'react-hook-form';
-import { FieldProblem } from '@/components/forms/field-problem';
-import { inputClass } from '@/components/forms/text-field';
+import { FieldProblem } from './field-problem';
+import { inputClass } from './text-field';
 import { Formula } from '@/components/ui/formula';
 import { formatNumber } from '@/lib/format';
 import { checkResult, unusualRemark, type WrittenResult } from '@/lib/samples/check-result';
