@@ -32,6 +32,7 @@ export const COMPONENTS = {
   Sr: 'Sr++',
   HOCl: 'HOCl',
   SO3: 'HSO3-',
+  NH2Cl: 'NH2Cl',
 } as const;
 
 export type Component = keyof typeof COMPONENTS;
