@@ -70,9 +70,10 @@ export default function TrendChart({
 }) {
   const palette = usePalette();
   const data = useMemo(() => chartData(points, gapMs, palette), [points, gapMs, palette]);
+  const isNeverNegative = points.every(({ value }) => value >= 0) && (target?.lowest ?? 0) >= 0;
   const options = useMemo(
-    () => chartOptions({ palette, target, from, to, decimals, unit, timeZone }),
-    [palette, target, from, to, decimals, unit, timeZone],
+    () => chartOptions({ palette, target, from, to, decimals, unit, timeZone, isNeverNegative }),
+    [palette, target, from, to, decimals, unit, timeZone, isNeverNegative],
   );
   return (
     <div className="relative h-56 w-full">
@@ -145,6 +146,7 @@ function chartOptions({
   decimals,
   unit,
   timeZone,
+  isNeverNegative,
 }: {
   palette: ChartPalette;
   target: TargetBand | null;
@@ -153,6 +155,7 @@ function chartOptions({
   decimals: number;
   unit: string;
   timeZone: string;
+  isNeverNegative: boolean;
 }): ChartOptions<'line'> {
   const figures = { family: palette.figureFont, size: 13 };
   const suggested = [target?.lowest, target?.highest].filter(
@@ -183,6 +186,10 @@ function chartOptions({
           ? {}
           : { suggestedMin: Math.min(...suggested), suggestedMax: Math.max(...suggested) }),
         grace: '6%',
+        // The room left around the line never suggests a negative amount of what cannot be negative.
+        afterDataLimits: (axis) => {
+          if (axis.min < 0 && isNeverNegative) axis.min = 0;
+        },
         // One width for every panel, so that their time axes stand above one another.
         afterFit: (axis) => {
           axis.width = 64;
