@@ -19,3 +19,30 @@ export { oxidise, type Oxidation, type Oxidised } from './steps/oxidise';
 export { precipitate, type Precipitated, type Precipitation } from './steps/precipitate';
 export { AIR_CO2_ATM, stripCarbonDioxide, type Stripping } from './steps/strip';
 export { solveReactions, type GivenReaction, type ReactionTable } from './ledger/reaction-set';
+export { planDoses } from './planning/plan';
+export type {
+  BindingTarget,
+  Plan,
+  PlanReagent,
+  PlanRequest,
+  PlanTarget,
+  Violation,
+} from './planning/plan-types';
+export {
+  disinfect,
+  type Contact,
+  type Disinfectant,
+  type Inactivation,
+  type Organism,
+} from './disinfection/disinfect';
+export {
+  DEFAULT_ANALYTE_UNCERTAINTY,
+  DEFAULT_UNCERTAINTIES,
+  howSure,
+  type Band,
+  type HowSure,
+  type Influence,
+  type Measured,
+  type Sampling,
+  type Uncertainty,
+} from './uncertainty/how-sure';

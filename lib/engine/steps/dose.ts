@@ -1,6 +1,7 @@
 import { COMPONENT_KEYS } from '../constants/components';
 import { refuse } from '../refusal';
 import { ALUM_HYDRATE, isReagent, REAGENTS, WATER_G_MOL } from '../reagents/catalogue';
+import { equilibrateWith } from '../solids/equilibrate-with';
 import { checkNumber } from '../speciation/analysis';
 import { solveClosed } from '../speciation/closed';
 import { describe } from '../speciation/describe';
@@ -24,6 +25,11 @@ export interface Feeding {
   readonly totals: Float64Array;
   readonly fed: Readonly<Record<string, number>>;
   readonly complete: readonly CompleteReaction[];
+}
+
+export interface DoseOptions {
+  /** `complete` (when left out): a coagulant's metal leaves to the last; `equilibrium`: as far as its solubility. */
+  readonly solids?: 'complete' | 'equilibrium';
 }
 
 /** Refuses an unknown reagent, a dose that is not a number, negative, or absurd. */
@@ -54,19 +60,28 @@ export function doseMolarMass({ reagent, hydrate }: Pick<Dose, 'reagent' | 'hydr
 }
 
 /** Puts a (checked) dose into the totals of a water and runs what runs to its end. */
-export function feed(water: Water, dose: Dose): Feeding {
+export const feed = (water: Water, dose: Dose): Feeding =>
+  feedInto(totalsOf(water), water.temperatureC, dose);
+
+/** The same for bare totals, which are not changed. */
+export function feedInto(
+  before: Float64Array,
+  temperatureC: number,
+  dose: Dose,
+  options: DoseOptions = {},
+): Feeding {
   const info = REAGENTS[dose.reagent];
   const moles = dose.doseMgL / (1000 * doseMolarMass(dose));
-  const totals = totalsOf(water);
+  const totals = Float64Array.from(before);
   const fed: Record<string, number> = {};
   for (const [key, count] of Object.entries(info.fed)) {
     fed[key] = count * moles;
     addSpecies(totals, key, count * moles);
   }
   const complete: CompleteReaction[] = [];
-  if (info.precipitates && moles > 0) {
+  if (info.precipitates && moles > 0 && options.solids !== 'equilibrium') {
     const { solid, molPerMol } = info.precipitates;
-    complete.push(precipitationOf(solid, molPerMol * moles, water.temperatureC));
+    complete.push(precipitationOf(solid, molPerMol * moles, temperatureC));
   }
   const chlorine = totals[COMPONENT_KEYS.indexOf('HOCl')] ?? 0;
   const sulfite = totals[COMPONENT_KEYS.indexOf('SO3')] ?? 0;
@@ -82,12 +97,12 @@ export function feed(water: Water, dose: Dose): Feeding {
 
 /**
  * Adds a dose and finds the new equilibrium in solution, closed to the atmosphere. A metal coagulant's metal leaves
- * completely as its hydroxide (`precipitatedMolKg`); no other solid forms.
+ * completely as its hydroxide (`precipitatedMolKg`) unless the options say otherwise; no other solid forms.
  */
-export function applyDose(water: Water, dose: Dose): Solved | Refusal {
+export function applyDose(water: Water, dose: Dose, options: DoseOptions = {}): Solved | Refusal {
   const fault = checkDose(dose);
   if (fault) return fault;
-  const { totals, complete } = feed(water, dose);
+  const { totals, complete } = feedInto(totalsOf(water), water.temperatureC, dose, options);
   const outcome = solveClosed(water.temperatureC, totals, startOf(water));
   if (!outcome.ending.converged) {
     return refuse(
@@ -96,6 +111,10 @@ export function applyDose(water: Water, dose: Dose): Solved | Refusal {
     );
   }
   const solved = describe(outcome, totals, water.temperatureC, water.assumptions);
+  const { precipitates } = REAGENTS[dose.reagent];
+  if (options.solids === 'equilibrium' && precipitates) {
+    return equilibrateWith(solved, [precipitates.solid]);
+  }
   const solids = complete.filter((reaction) => reaction.solid !== undefined);
   if (solids.length === 0) return { ok: true, water: solved };
   const precipitatedMolKg: Record<string, number> = {};
@@ -109,13 +128,14 @@ export function applyDose(water: Water, dose: Dose): Solved | Refusal {
 export function applyDoses(
   water: Water,
   doses: readonly Dose[],
+  options: DoseOptions = {},
 ): { readonly ok: true; readonly waters: Water[] } | Refusal {
   const waters: Water[] = [];
   let current = water;
   for (const [i, dose] of doses.entries()) {
     const fault = checkDose(dose, `${i}`);
     if (fault) return fault;
-    const solved = applyDose(current, dose);
+    const solved = applyDose(current, dose, options);
     if (!solved.ok) return solved;
     current = solved.water;
     waters.push(current);
