@@ -8,5 +8,6 @@ export async function grantToAppRole(owner: Knex, appRole: string): Promise<void
   await owner.raw('grant select, insert, update, delete on all tables in schema public to ??', [
     role,
   ]);
+  await owner.raw('revoke all on knex_migrations, knex_migrations_lock from ??', [role]);
   await owner.raw('grant usage on all sequences in schema public to ??', [role]);
 }

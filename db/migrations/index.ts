@@ -2,11 +2,13 @@ import type { Knex } from 'knex';
 import * as peopleAndPlants from './20261201090000_people_and_plants';
 import * as samples from './20261201091000_samples';
 import * as plans from './20261201092000_plans';
+import * as rowPolicies from './20261201110000_row_policies';
 
 const migrations: Readonly<Record<string, Knex.Migration>> = {
   '20261201090000_people_and_plants': peopleAndPlants,
   '20261201091000_samples': samples,
   '20261201092000_plans': plans,
+  '20261201110000_row_policies': rowPolicies,
 };
 
 /** Imported rather than read from disk, so that every runner (tsx, vitest, knex) finds the same list. */

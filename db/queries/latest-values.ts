@@ -43,14 +43,12 @@ export async function listLatestValues(
         { column: 's.taken_at', order: 'desc' },
       ])
       .select('s.point_id', 's.taken_at', 'r.sample_id', 'r.quantity', 'r.value');
-  const [results, indices] = await Promise.all([
-    newest<ResultRow>('results').select<Latest[]>(
-      'r.entered_text',
-      'r.entered_unit',
-      'r.qualifier',
-    ),
-    newest<SampleIndexRow>('sample_indices') as unknown as Promise<Latest[]>,
-  ]);
+  const results = await newest<ResultRow>('results').select<Latest[]>(
+    'r.entered_text',
+    'r.entered_unit',
+    'r.qualifier',
+  );
+  const indices = await newest<SampleIndexRow>('sample_indices').select<Latest[]>();
   return [...results, ...indices].map((row) => ({
     pointId: row.point_id,
     sampleId: row.sample_id,

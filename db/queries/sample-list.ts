@@ -34,28 +34,26 @@ export async function listSamplePage(
       .where('s.plant_id', plantId);
     return filter.pointId === undefined ? query : query.where('s.point_id', filter.pointId);
   };
-  const [rows, counted] = await Promise.all([
-    filtered()
-      .join<PersonRow>('people as p', 'p.id', 's.entered_by')
-      // The id breaks ties, so that no sample falls between two pages.
-      .orderBy([{ column: 's.taken_at', order: 'desc' }, { column: 's.id' }])
-      .limit(filter.limit)
-      .offset(filter.offset)
-      .select<(Pick<SampleRow, 'id' | 'point_id' | 'taken_at'> & { person_name: string })[]>(
-        's.id',
-        's.point_id',
-        's.taken_at',
-        'p.name as person_name',
-      ),
-    filtered().count<{ count: number }[]>('* as count'),
-  ]);
+  const rows = await filtered()
+    .join<PersonRow>('people as p', 'p.id', 's.entered_by')
+    // The id breaks ties, so that no sample falls between two pages.
+    .orderBy([{ column: 's.taken_at', order: 'desc' }, { column: 's.id' }])
+    .limit(filter.limit)
+    .offset(filter.offset)
+    .select<(Pick<SampleRow, 'id' | 'point_id' | 'taken_at'> & { person_name: string })[]>(
+      's.id',
+      's.point_id',
+      's.taken_at',
+      'p.name as person_name',
+    );
+  const counted = await filtered().count<{ count: number }[]>('* as count');
   const ids = rows.map(({ id }) => id);
-  const [results, indices] = await Promise.all([
-    db<ResultRow>('results').where({ organisation_id: organisationId }).whereIn('sample_id', ids),
-    db<SampleIndexRow>('sample_indices')
-      .where({ organisation_id: organisationId })
-      .whereIn('sample_id', ids),
-  ]);
+  const results = await db<ResultRow>('results')
+    .where({ organisation_id: organisationId })
+    .whereIn('sample_id', ids);
+  const indices = await db<SampleIndexRow>('sample_indices')
+    .where({ organisation_id: organisationId })
+    .whereIn('sample_id', ids);
   return {
     total: counted[0]?.count ?? 0,
     samples: rows.map((row) => ({

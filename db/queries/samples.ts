@@ -144,11 +144,9 @@ export async function findSample(
     );
   if (sample === undefined) return undefined;
   const own = { organisation_id: organisationId, sample_id: sampleId };
-  const [results, indices, solution] = await Promise.all([
-    db<ResultRow>('results').where(own),
-    db<SampleIndexRow>('sample_indices').where(own),
-    db<SolutionRow>('solutions').where(own).first(),
-  ]);
+  const results = await db<ResultRow>('results').where(own);
+  const indices = await db<SampleIndexRow>('sample_indices').where(own);
+  const solution = await db<SolutionRow>('solutions').where(own).first();
   return {
     id: sample.id,
     pointId: sample.point_id,

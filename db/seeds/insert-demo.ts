@@ -39,7 +39,7 @@ export async function insertDemo(
   await insertSamples(db, data, columns);
 }
 
-/** People outlive an organisation: those already known keep their id and get the demo's password back. */
+/** People outlive an organisation: those already known stay as they are. */
 async function insertPeople(
   db: Knex,
   people: readonly DemoPerson[],
@@ -54,8 +54,8 @@ async function insertPeople(
         password_hash: passwordHashByEmail.get(email) ?? NO_PASSWORD,
       })),
     )
-    .onConflict('email')
-    .merge(['password_hash']);
+    .onConflict()
+    .ignore();
 }
 
 async function insertSamples(

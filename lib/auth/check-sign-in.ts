@@ -1,5 +1,5 @@
-import { database } from '@/db/client';
 import { findPersonByEmail } from '@/db/queries/people';
+import { inContext } from '@/db/tenant';
 import { signInInput } from '@/lib/people/schema';
 import { hashPassword, verifyPassword } from './passwords';
 
@@ -11,10 +11,11 @@ export async function checkSignIn(
 ): Promise<{ id: string; name: string; email: string } | null> {
   const parsed = signInInput.safeParse(credentials);
   if (!parsed.success) return null;
-  const person = await findPersonByEmail(database(), parsed.data.email);
+  const { email, password } = parsed.data;
+  const person = await inContext({ signInEmail: email }, (db) => findPersonByEmail(db, email));
   unknownPersonHash ??= hashPassword(crypto.randomUUID());
   const hash = person?.passwordHash ?? (await unknownPersonHash);
-  const matches = await verifyPassword(hash, parsed.data.password);
+  const matches = await verifyPassword(hash, password);
   if (person === undefined || !matches) return null;
   return { id: person.id, name: person.name, email: person.email };
 }

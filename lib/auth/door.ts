@@ -1,5 +1,5 @@
-import { database } from '@/db/client';
 import { findMembership } from '@/db/queries/people';
+import { inContext } from '@/db/tenant';
 import { AppError, notFound } from '@/lib/errors';
 import type { Organisation } from '@/lib/organisations/schema';
 import { roleMay, type Permission, type Role } from './permissions';
@@ -22,7 +22,9 @@ export async function enter(
   permission: Permission,
 ): Promise<Actor> {
   if (personId === null) throw new AppError('signedOut', 'Sign in to go on.');
-  const membership = await findMembership(database(), personId, organisationSlug);
+  const membership = await inContext({ personId }, (db) =>
+    findMembership(db, personId, organisationSlug),
+  );
   if (membership === undefined) throw notFound('organisation');
   if (!roleMay(membership.role, permission)) {
     throw new AppError('forbidden', `A ${membership.role} may not do this here.`);

@@ -1,5 +1,4 @@
 import { CONSTANTS_HASH, ENGINE_VERSION } from '@/lib/engine';
-import { demoId } from './ids';
 import { DEMO_ORGANISATION, demoPeople } from './people';
 import { createRandom } from './random';
 import { dailyRainMm } from './rain';
@@ -35,10 +34,7 @@ export function buildDemo({ now, seed = SEED, days = DAYS }: DemoOptions): DemoD
   };
   const works = DEMO_WORKS.map((each, index) => worksRows(each, index + 1, common));
   return {
-    organisation: {
-      id: demoId(random, 'organisation', DEMO_ORGANISATION.slug),
-      ...DEMO_ORGANISATION,
-    },
+    organisation: DEMO_ORGANISATION,
     people,
     plants: works.flatMap((each) => each.plants),
     points: works.flatMap((each) => each.points),

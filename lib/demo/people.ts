@@ -2,7 +2,12 @@ import { idFrom } from '@/lib/ids';
 import { createRandom } from './random';
 import type { DemoPerson, DemoSignIn } from './schema';
 
-export const DEMO_ORGANISATION = { slug: 'calverdine', name: 'Calverdine Water Board' } as const;
+/** The same id whatever the seed and the day, so that a second seeding finds the first one's work. */
+export const DEMO_ORGANISATION = {
+  id: idFrom('organisation', createRandom('organisation calverdine').bytes(16)),
+  slug: 'calverdine',
+  name: 'Calverdine Water Board',
+} as const;
 
 /** Invented people; the passwords open nothing but the demo and are printed with it. */
 export const DEMO_SIGN_INS: readonly DemoSignIn[] = [

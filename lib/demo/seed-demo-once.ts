@@ -12,7 +12,7 @@ export async function seedDemoOnce(
   ownerUrl: string,
   { now = new Date() }: { now?: Date } = {},
 ): Promise<DemoSignIn[]> {
-  await insertDemoOnce(ownerUrl, DEMO_ORGANISATION.slug, async () => {
+  await insertDemoOnce(ownerUrl, DEMO_ORGANISATION.id, async () => {
     const passwordHashes = await Promise.all(
       DEMO_SIGN_INS.map(
         async ({ email, password }) => [email, await hashPassword(password)] as const,

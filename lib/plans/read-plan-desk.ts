@@ -1,6 +1,7 @@
-import { database } from '@/db/client';
-import { listDosingPoints, listSamplingPoints, listTargets } from '@/db/queries/plants';
+import { readPlantSheet } from '@/db/queries/plant-sheet';
+import { listDosingPoints } from '@/db/queries/plants';
 import type { Actor } from '@/lib/auth/door';
+import { inTenant } from '@/lib/auth/in-tenant';
 import type { Clock } from '@/lib/clock';
 import type { Plant } from '@/lib/plants/schema';
 import { getSample } from '@/lib/samples/get-sample';
@@ -15,13 +16,14 @@ export async function readPlanDesk(
   sampleId: string,
   clock: Clock,
 ): Promise<PlanDeskData> {
-  const scope = [database(), actor.organisation.id, plant.id] as const;
-  const [sample, dosing, points, targets] = await Promise.all([
-    getSample(actor, plant, sampleId),
-    listDosingPoints(...scope, clock()),
-    listSamplingPoints(...scope),
-    listTargets(...scope),
-  ]);
+  const sample = await getSample(actor, plant, sampleId);
+  const { dosing, points, targets } = await inTenant(actor, async (db) => {
+    const scope = [db, actor.organisation.id, plant.id] as const;
+    return {
+      dosing: await listDosingPoints(...scope, clock()),
+      ...(await readPlantSheet(...scope)),
+    };
+  });
   const finished = points.find(({ kind }) => kind === 'finished');
   return {
     sample: { id: sample.id, pointName: sample.pointName, takenAt: sample.takenAt },

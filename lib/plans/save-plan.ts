@@ -1,6 +1,6 @@
 import { insertPlan } from '@/db/queries/plans';
-import { inTransaction } from '@/db/transaction';
 import type { Actor } from '@/lib/auth/door';
+import { inTenant } from '@/lib/auth/in-tenant';
 import { applyDose, CONSTANTS_HASH, ENGINE_VERSION } from '@/lib/engine';
 import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/ids';
@@ -31,7 +31,7 @@ export async function savePlan(actor: Actor, input: PlanInput): Promise<{ planId
       'The plan on your screen no longer matches this sample. Load the page again and look at the new figures before saving.',
     );
   }
-  const planId = await inTransaction((db) =>
+  const planId = await inTenant(actor, (db) =>
     insertPlan(db, {
       id: newId('plan'),
       organisationId: actor.organisation.id,

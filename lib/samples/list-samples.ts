@@ -1,7 +1,7 @@
-import { database } from '@/db/client';
-import { listPointQuantities, listSamplingPoints, listTargets } from '@/db/queries/plants';
+import { readPlantSheet } from '@/db/queries/plant-sheet';
 import { listSamplePage, type ListedSample } from '@/db/queries/sample-list';
 import type { Actor } from '@/lib/auth/door';
+import { inTenant } from '@/lib/auth/in-tenant';
 import { formatDayTime } from '@/lib/format';
 import { judge } from '@/lib/plants/judge';
 import type { Plant, PointQuantity, SamplingPoint, Target } from '@/lib/plants/schema';
@@ -25,18 +25,20 @@ export async function listSamples(
   plant: Plant,
   asked: { point: string | undefined; page: number },
 ): Promise<SampleTable & { points: readonly SamplingPoint[]; point: SamplingPoint | undefined }> {
-  const scope = [database(), actor.organisation.id, plant.id] as const;
-  const [points, quantities, targets] = await Promise.all([
-    listSamplingPoints(...scope),
-    listPointQuantities(...scope),
-    listTargets(...scope),
-  ]);
-  const point = points.find(({ slug }) => slug === asked.point);
-  const { samples, total } = await listSamplePage(...scope, {
-    pointId: point?.id,
-    limit: PAGE_SIZE,
-    offset: (asked.page - 1) * PAGE_SIZE,
-  });
+  const { points, point, quantities, targets, samples, total } = await inTenant(
+    actor,
+    async (db) => {
+      const scope = [db, actor.organisation.id, plant.id] as const;
+      const sheet = await readPlantSheet(...scope);
+      const chosen = sheet.points.find(({ slug }) => slug === asked.point);
+      const page = await listSamplePage(...scope, {
+        pointId: chosen?.id,
+        limit: PAGE_SIZE,
+        offset: (asked.page - 1) * PAGE_SIZE,
+      });
+      return { ...sheet, ...page, point: chosen };
+    },
+  );
   const own = quantities.filter(({ pointId }) => pointId === point?.id);
   const listed: readonly string[] =
     point === undefined ? ALL_POINTS_COLUMNS : [...own.map((row) => row.quantity), 'calciteIndex'];

@@ -1,7 +1,7 @@
-import { database } from '@/db/client';
 import { listLatestValues } from '@/db/queries/latest-values';
-import { listPointQuantities, listSamplingPoints } from '@/db/queries/plants';
+import { readPlantSheet } from '@/db/queries/plant-sheet';
 import type { Actor } from '@/lib/auth/door';
+import { inTenant } from '@/lib/auth/in-tenant';
 import type { Clock } from '@/lib/clock';
 import { formatAge } from '@/lib/format';
 import { localFromMoment } from '@/lib/plants/local-time';
@@ -20,13 +20,13 @@ export async function readEntrySheet(
   clock: Clock,
 ): Promise<EntrySheet | null> {
   const now = clock();
-  const db = database();
-  const scope = [db, actor.organisation.id, plant.id] as const;
-  const [points, quantities, latest] = await Promise.all([
-    listSamplingPoints(...scope),
-    listPointQuantities(...scope),
-    listLatestValues(...scope, new Date(now.getTime() - MEMORY_MS)),
-  ]);
+  const { points, quantities, latest } = await inTenant(actor, async (db) => {
+    const scope = [db, actor.organisation.id, plant.id] as const;
+    return {
+      ...(await readPlantSheet(...scope)),
+      latest: await listLatestValues(...scope, new Date(now.getTime() - MEMORY_MS)),
+    };
+  });
   const point = points.find(({ slug }) => slug === wantedPoint) ?? points[0];
   if (point === undefined) return null;
   const fields = quantities

@@ -1,8 +1,7 @@
-import { listPointQuantities, listSamplingPoints } from '@/db/queries/plants';
+import { readPlantSheet } from '@/db/queries/plant-sheet';
 import { insertSample } from '@/db/queries/samples';
-import { database } from '@/db/client';
-import { inTransaction } from '@/db/transaction';
 import type { Actor } from '@/lib/auth/door';
+import { inTenant } from '@/lib/auth/in-tenant';
 import { systemClock, type Clock } from '@/lib/clock';
 import { CONSTANTS_HASH, ENGINE_VERSION } from '@/lib/engine';
 import { AppError, notFound } from '@/lib/errors';
@@ -26,8 +25,9 @@ export async function saveSample(
   clock: Clock = systemClock,
 ): Promise<{ sampleId: string }> {
   const plant = await getPlant(actor, input.plantSlug);
-  const scope = [database(), actor.organisation.id, plant.id] as const;
-  const points = await listSamplingPoints(...scope);
+  const { points, quantities } = await inTenant(actor, (db) =>
+    readPlantSheet(db, actor.organisation.id, plant.id),
+  );
   const point = points.find(({ slug }) => slug === input.pointSlug);
   if (point === undefined) throw notFound('sampling point');
   const takenAt = momentFromLocal(input.takenAtLocal, plant.timeZone);
@@ -44,15 +44,13 @@ export async function saveSample(
     );
   }
   const listed = new Set(
-    (await listPointQuantities(...scope))
-      .filter(({ pointId }) => pointId === point.id)
-      .map(({ quantity }) => quantity),
+    quantities.filter(({ pointId }) => pointId === point.id).map(({ quantity }) => quantity),
   );
   const stray = input.results.find(({ quantity }) => !listed.has(quantity));
   if (stray !== undefined) {
     throw new AppError('badInput', `${point.name} does not list ${stray.quantity}.`);
   }
-  const sampleId = await inTransaction((db) =>
+  const sampleId = await inTenant(actor, (db) =>
     insertSample(db, {
       id: newId('sample'),
       organisationId: actor.organisation.id,

@@ -1,14 +1,8 @@
-import { database } from '@/db/client';
 import { listLatestValues, type LatestValue } from '@/db/queries/latest-values';
-import {
-  listDosingPoints,
-  listPointQuantities,
-  listSamplingPoints,
-  listShiftNotes,
-  listTargets,
-  listTrainSteps,
-} from '@/db/queries/plants';
+import { readPlantSheet } from '@/db/queries/plant-sheet';
+import { listDosingPoints, listShiftNotes, listTrainSteps } from '@/db/queries/plants';
 import type { Actor } from '@/lib/auth/door';
+import { inTenant } from '@/lib/auth/in-tenant';
 import type { Clock } from '@/lib/clock';
 import type { Plant, PointQuantity, SamplingPoint, Target } from '@/lib/plants/schema';
 import { describeAt, isSeriesKey, writeValue } from '@/lib/samples/describe';
@@ -21,20 +15,22 @@ const MEMORY_MS = 60 * 86_400_000;
 /** Shown at every point that has them, after pH and the targets and before the rest of its list. */
 const ALWAYS_SHOWN = ['calciteIndex', 'turbidity', 'alkalinity', 'temperature'] as const;
 
-/** Everything the first screen needs: six queries, however many points the plant has. */
+/** Everything the first screen needs: eight queries on one connection, however many points the plant has. */
 export async function readToday(actor: Actor, plant: Plant, clock: Clock): Promise<Today> {
   const now = clock();
-  const db = database();
-  const scope = [db, actor.organisation.id, plant.id] as const;
-  const [steps, points, quantities, targets, dosing, latest, notes] = await Promise.all([
-    listTrainSteps(...scope),
-    listSamplingPoints(...scope),
-    listPointQuantities(...scope),
-    listTargets(...scope),
-    listDosingPoints(...scope, now),
-    listLatestValues(...scope, new Date(now.getTime() - MEMORY_MS)),
-    listShiftNotes(...scope, NOTES_SHOWN),
-  ]);
+  const { steps, points, quantities, targets, dosing, latest, notes } = await inTenant(
+    actor,
+    async (db) => {
+      const scope = [db, actor.organisation.id, plant.id] as const;
+      return {
+        ...(await readPlantSheet(...scope)),
+        steps: await listTrainSteps(...scope),
+        dosing: await listDosingPoints(...scope, now),
+        latest: await listLatestValues(...scope, new Date(now.getTime() - MEMORY_MS)),
+        notes: await listShiftNotes(...scope, NOTES_SHOWN),
+      };
+    },
+  );
   return {
     now,
     notes,

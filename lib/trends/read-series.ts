@@ -1,7 +1,7 @@
-import { database } from '@/db/client';
-import { listPointQuantities, listSamplingPoints, listTargets } from '@/db/queries/plants';
+import { readPlantSheet } from '@/db/queries/plant-sheet';
 import { listIndexSeries, listResultSeries } from '@/db/queries/series';
 import type { Actor } from '@/lib/auth/door';
+import { inTenant } from '@/lib/auth/in-tenant';
 import { AppError, notFound } from '@/lib/errors';
 import { momentFromLocal } from '@/lib/plants/local-time';
 import { getPlant } from '@/lib/plants/read-plants';
@@ -26,23 +26,20 @@ export async function readSeries(
   query: SeriesQuery,
 ): Promise<Series> {
   const plant = await getPlant(actor, plantSlug);
-  const db = database();
-  const scope = [db, actor.organisation.id, plant.id] as const;
-  const [points, quantities, targets] = await Promise.all([
-    listSamplingPoints(...scope),
-    listPointQuantities(...scope),
-    listTargets(...scope),
-  ]);
-  const point = points.find(({ slug }) => slug === query.point);
-  if (point === undefined) throw notFound('sampling point');
   const key = query.quantity;
+  const [from, to] = spanOf(query, plant);
+  const { point, quantities, targets, rows } = await inTenant(actor, async (db) => {
+    const sheet = await readPlantSheet(db, actor.organisation.id, plant.id);
+    const found = sheet.points.find(({ slug }) => slug === query.point);
+    if (found === undefined) throw notFound('sampling point');
+    const list = isIndexKey(key) ? listIndexSeries : listResultSeries;
+    const read = await list(db, actor.organisation.id, found.id, key, from, to);
+    return { ...sheet, point: found, rows: read };
+  });
   const of = (row: { pointId: string; quantity: string }) =>
     row.pointId === point.id && row.quantity === key;
   const as = describeAt(key, quantities.find(of));
   const target = targets.find(of) ?? null;
-  const [from, to] = spanOf(query, plant);
-  const list = isIndexKey(key) ? listIndexSeries : listResultSeries;
-  const rows = await list(db, actor.organisation.id, point.id, key, from, to);
   const gapMs = gapOf(point);
   const missed = (row: { value: number }) =>
     target !== null && judge(row.value, target) !== 'within';

@@ -1,6 +1,6 @@
-import { database } from '@/db/client';
-import { listPointQuantities, listSamplingPoints, listTargets } from '@/db/queries/plants';
+import { readPlantSheet } from '@/db/queries/plant-sheet';
 import type { Actor } from '@/lib/auth/door';
+import { inTenant } from '@/lib/auth/in-tenant';
 import type { Clock } from '@/lib/clock';
 import { localFromMoment } from '@/lib/plants/local-time';
 import type { Plant } from '@/lib/plants/schema';
@@ -18,12 +18,9 @@ export async function readTrendChoices(
   plant: Plant,
   clock: Clock,
 ): Promise<TrendChoices> {
-  const scope = [database(), actor.organisation.id, plant.id] as const;
-  const [points, quantities, targets] = await Promise.all([
-    listSamplingPoints(...scope),
-    listPointQuantities(...scope),
-    listTargets(...scope),
-  ]);
+  const { points, quantities, targets } = await inTenant(actor, (db) =>
+    readPlantSheet(db, actor.organisation.id, plant.id),
+  );
   return {
     today: localFromMoment(clock(), plant.timeZone).slice(0, 10),
     points: points.map(({ id, slug, name }) => {

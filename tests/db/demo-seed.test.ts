@@ -41,7 +41,7 @@ const counts = async (): Promise<Record<string, number>> => {
 
 beforeAll(async () => {
   test = await createTestDatabase();
-  db = knex(ownerKnexConfig(test.ownerUrl));
+  db = knex(ownerKnexConfig(test.adminUrl));
   first = await seedDemoOnce(test.ownerUrl, { now: NOW });
 }, 120_000);
 
@@ -108,7 +108,7 @@ describe('seeding the demo', () => {
 
   it('leaves nothing behind when a row is refused', async () => {
     const own = await createTestDatabase();
-    const ownDb = knex(ownerKnexConfig(own.ownerUrl));
+    const ownDb = knex(ownerKnexConfig(own.adminUrl));
     try {
       // One row of the last table is refused.
       await ownDb.raw(`alter table sample_indices add check (quantity <> 'ryznar')`);

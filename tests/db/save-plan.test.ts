@@ -17,15 +17,15 @@ import { insertSmallWorks, SMALL_WORKS } from '../support/small-works';
 import { createTestDatabase, type TestDatabase } from '../support/test-database';
 
 let database: TestDatabase;
-let owner: Knex;
+let admin: Knex;
 let actor: Actor;
 let sampleId: string;
 
 beforeAll(async () => {
   database = await createTestDatabase();
   process.env.DATABASE_URL = database.url;
-  owner = knex(ownerKnexConfig(database.ownerUrl));
-  await insertSmallWorks(owner);
+  admin = knex(ownerKnexConfig(database.adminUrl));
+  await insertSmallWorks(admin);
   actor = await enter(SMALL_WORKS.personId, 'small', 'plan.write');
   ({ sampleId } = await saveSample(
     actor,
@@ -46,7 +46,7 @@ beforeAll(async () => {
 });
 afterAll(async () => {
   await pool().destroy();
-  await owner.destroy();
+  await admin.destroy();
   await database.drop();
 });
 
@@ -91,14 +91,14 @@ describe('saving a plan', () => {
   it('refuses a preview that the server does not find itself', async () => {
     const input = planOf({ previewedPH: previewedPH(5) + 0.01 });
     await expect(savePlan(actor, input)).rejects.toMatchObject({ code: 'conflict' });
-    expect(await owner('plans').where({ client_key: input.clientKey })).toHaveLength(0);
+    expect(await admin('plans').where({ client_key: input.clientKey })).toHaveLength(0);
   });
 
   it('keeps one plan however often it is sent at once', async () => {
     const input = planOf();
     const answers = await Promise.all(Array.from({ length: 20 }, () => savePlan(actor, input)));
     expect(new Set(answers.map(({ planId }) => planId)).size).toBe(1);
-    expect(await owner('plans').where({ client_key: input.clientKey })).toHaveLength(1);
+    expect(await admin('plans').where({ client_key: input.clientKey })).toHaveLength(1);
   });
 
   it('knows no sample of another plant', async () => {

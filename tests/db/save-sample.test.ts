@@ -11,20 +11,20 @@ import { insertSmallWorks, SMALL_WORKS } from '../support/small-works';
 import { createTestDatabase, type TestDatabase } from '../support/test-database';
 
 let database: TestDatabase;
-let owner: Knex;
+let admin: Knex;
 let actor: Actor;
 
 beforeAll(async () => {
   database = await createTestDatabase();
   process.env.DATABASE_URL = database.url;
-  owner = knex(ownerKnexConfig(database.ownerUrl));
-  await insertSmallWorks(owner);
-  await insertSmallWorks(owner, '-2');
+  admin = knex(ownerKnexConfig(database.adminUrl));
+  await insertSmallWorks(admin);
+  await insertSmallWorks(admin, '-2');
   actor = await enter(SMALL_WORKS.personId, 'small', 'sample.write');
 });
 afterAll(async () => {
   await pool().destroy();
-  await owner.destroy();
+  await admin.destroy();
   await database.drop();
 });
 
@@ -71,9 +71,9 @@ describe('saving a sample', () => {
       Array.from({ length: 50 }, () => saveSample(actor, input, now)),
     );
     expect(new Set(answers.map(({ sampleId }) => sampleId)).size).toBe(1);
-    const kept = await owner('samples').where({ client_key: input.clientKey });
+    const kept = await admin('samples').where({ client_key: input.clientKey });
     expect(kept).toHaveLength(1);
-    expect(await owner('results').where({ sample_id: answers[0]?.sampleId })).toHaveLength(4);
+    expect(await admin('results').where({ sample_id: answers[0]?.sampleId })).toHaveLength(4);
   });
 
   it('keeps a sample that cannot be solved, without indices', async () => {
@@ -98,7 +98,7 @@ describe('saving a sample', () => {
   ])('refuses %j with a sentence and writes nothing', async (changes, sentence) => {
     const input = sheet(changes);
     await expect(saveSample(actor, input, now)).rejects.toThrow(sentence);
-    expect(await owner('samples').where({ client_key: input.clientKey })).toHaveLength(0);
+    expect(await admin('samples').where({ client_key: input.clientKey })).toHaveLength(0);
   });
 
   it('shows another organisation’s sample to nobody else', async () => {
@@ -120,7 +120,7 @@ describe('the door', () => {
   });
 
   it('refuses a consultant who would write a sample, at the very next request after the role changed', async () => {
-    const membership = owner('memberships').where({ person_id: SMALL_WORKS.personId });
+    const membership = admin('memberships').where({ person_id: SMALL_WORKS.personId });
     await membership.clone().update({ role: 'consultant' });
     await expect(enter(SMALL_WORKS.personId, 'small', 'sample.write')).rejects.toMatchObject({
       code: 'forbidden',

@@ -6,20 +6,20 @@ import { signIn, signInOf } from '../support/sign-in';
 
 const baseUrl = inject('baseUrl');
 const operator = signInOf(inject('signIns'), 'operator');
-const owner = new pg.Client({ connectionString: inject('ownerUrl') });
+const admin = new pg.Client({ connectionString: inject('adminUrl') });
 let browser: Browser;
 
 beforeAll(async () => {
   browser = await launchBrowser();
-  await owner.connect();
+  await admin.connect();
 });
 afterAll(async () => {
   await browser.close();
-  await owner.end();
+  await admin.end();
 });
 
 const countSamples = async (): Promise<number> => {
-  const { rows } = await owner.query<{ n: number }>('select count(*)::int as n from samples');
+  const { rows } = await admin.query<{ n: number }>('select count(*)::int as n from samples');
   return rows[0]?.n ?? -1;
 };
 

@@ -9,7 +9,7 @@ declare module 'vitest' {
   interface ProvidedContext {
     baseUrl: string;
     databaseUrl: string;
-    ownerUrl: string;
+    adminUrl: string;
     signIns: DemoSignIn[];
   }
 }
@@ -37,7 +37,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
   });
   project.provide('baseUrl', baseUrl);
   project.provide('databaseUrl', database.url);
-  project.provide('ownerUrl', database.ownerUrl);
+  project.provide('adminUrl', database.adminUrl);
   project.provide('signIns', signIns);
   return async () => {
     await supervisor.stop();

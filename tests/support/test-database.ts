@@ -31,7 +31,10 @@ export function testServer(): TestServer {
 export interface TestDatabase {
   /** As the app's role. */
   url: string;
+  /** As the schema's owner, whom the row policies hold as well. */
   ownerUrl: string;
+  /** As the server's administrator, who sees every row: for checks from outside. */
+  adminUrl: string;
   drop: () => Promise<void>;
 }
 
@@ -45,6 +48,13 @@ export async function createTestDatabase(
   return {
     url: urlFor(adminUrl, APP_ROLE, appPassword, name),
     ownerUrl: urlFor(adminUrl, OWNER_ROLE, ownerPassword, name),
+    adminUrl: databaseUrl(adminUrl, name),
     drop: () => dropDatabase(adminUrl, name),
   };
+}
+
+function databaseUrl(serverUrl: string, name: string): string {
+  const url = new URL(serverUrl);
+  url.pathname = `/${name}`;
+  return url.href;
 }

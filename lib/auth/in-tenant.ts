@@ -1,0 +1,9 @@
+import type { Database } from '@/db/client';
+import { inContext } from '@/db/tenant';
+import type { Actor } from './door';
+
+/** One transaction in the actor's organisation. The tenant stands in every query as well: twice, on purpose. */
+export const inTenant = <T>(
+  { organisation, personId }: Actor,
+  work: (db: Database) => Promise<T>,
+): Promise<T> => inContext({ organisationId: organisation.id, personId }, work);
