@@ -1,15 +1,22 @@
+/** What is shown beside the address itself; the first page needs no number. */
+function queryOf(shown: Readonly<Record<string, string | number | undefined>>): string {
+  const query = new URLSearchParams();
+  for (const [name, value] of Object.entries(shown)) {
+    if (value !== undefined && !(name === 'page' && value === 1)) query.set(name, String(value));
+  }
+  return query.size === 0 ? '' : `?${query.toString()}`;
+}
+
 /** Every address of the product, in one place. */
 export const paths = {
   home: '/',
   signIn: '/sign-in',
   organisation: (org: string) => `/${org}`,
+  audit: (org: string, shown: { action?: string; page?: number } = {}) =>
+    `/${org}/audit${queryOf(shown)}`,
   today: (org: string, plant: string) => `/${org}/plants/${plant}`,
-  samples: (org: string, plant: string, shown: { point?: string; page?: number } = {}) => {
-    const query = new URLSearchParams();
-    if (shown.point !== undefined) query.set('point', shown.point);
-    if (shown.page !== undefined && shown.page > 1) query.set('page', String(shown.page));
-    return `/${org}/plants/${plant}/samples${query.size === 0 ? '' : `?${query.toString()}`}`;
-  },
+  samples: (org: string, plant: string, shown: { point?: string; page?: number } = {}) =>
+    `/${org}/plants/${plant}/samples${queryOf(shown)}`,
   newSample: (org: string, plant: string, point?: string) =>
     `/${org}/plants/${plant}/samples/new${point === undefined ? '' : `?point=${point}`}`,
   sample: (org: string, plant: string, sample: string) =>

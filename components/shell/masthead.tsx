@@ -1,4 +1,5 @@
 import Link from 'next/link';
+import { buttonClass } from '@/components/ui/button';
 import type { Organisation } from '@/lib/organisations/schema';
 import { paths } from '@/lib/paths';
 import { SignOutButton } from './sign-out-button';
@@ -10,10 +11,12 @@ export function Masthead({
   organisation,
   personName,
   role,
+  mayReadAudit,
 }: {
   organisation: Organisation;
   personName: string;
   role: string;
+  mayReadAudit: boolean;
 }) {
   return (
     <header className="mx-auto flex max-w-page flex-wrap items-center justify-between gap-x-6 gap-y-1 px-4 pt-3 pb-2 sm:px-8">
@@ -34,6 +37,11 @@ export function Masthead({
         <p className="mr-2 hidden text-sm text-ink-soft sm:block">
           {personName}, {role}
         </p>
+        {mayReadAudit ? (
+          <Link href={paths.audit(organisation.slug)} className={buttonClass('quiet')}>
+            Audit
+          </Link>
+        ) : null}
         <ThemeSwitch />
         <SignOutButton />
       </div>

@@ -2,6 +2,7 @@ import type { Knex } from 'knex';
 import * as peopleAndPlants from './20261201090000_people_and_plants';
 import * as samples from './20261201091000_samples';
 import * as plans from './20261201092000_plans';
+import * as audit from './20261201113000_audit';
 import * as rowPolicies from './20261201110000_row_policies';
 
 const migrations: Readonly<Record<string, Knex.Migration>> = {
@@ -9,6 +10,7 @@ const migrations: Readonly<Record<string, Knex.Migration>> = {
   '20261201091000_samples': samples,
   '20261201092000_plans': plans,
   '20261201110000_row_policies': rowPolicies,
+  '20261201113000_audit': audit,
 };
 
 /** Imported rather than read from disk, so that every runner (tsx, vitest, knex) finds the same list. */

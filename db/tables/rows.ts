@@ -180,3 +180,16 @@ export interface PlanDoseRow {
   reagent: string;
   dose_mg_per_l: number;
 }
+
+export interface AuditEntryRow {
+  organisation_id: string;
+  position: number;
+  at: Date;
+  actor_id: string;
+  actor_name: string;
+  action: string;
+  subject_id: string;
+  detail: unknown;
+  previous_hash: string;
+  hash: string;
+}

@@ -6,7 +6,13 @@ export const ROLES = ['operator', 'consultant', 'manager', 'owner'] as const;
 export type Role = (typeof ROLES)[number];
 
 export type Permission =
-  'plant.read' | 'sample.read' | 'sample.write' | 'plan.read' | 'plan.write' | 'trend.read';
+  | 'plant.read'
+  | 'sample.read'
+  | 'sample.write'
+  | 'plan.read'
+  | 'plan.write'
+  | 'trend.read'
+  | 'audit.read';
 
 export const PERMISSIONS = {
   'plant.read': ['operator', 'consultant', 'manager', 'owner'],
@@ -15,6 +21,7 @@ export const PERMISSIONS = {
   'plan.read': ['operator', 'consultant', 'manager', 'owner'],
   'plan.write': ['operator', 'consultant', 'manager', 'owner'],
   'trend.read': ['operator', 'consultant', 'manager', 'owner'],
+  'audit.read': ['manager', 'owner'],
 } as const satisfies Record<Permission, readonly Role[]>;
 
 export const roleMay = (role: Role, permission: Permission): boolean =>

@@ -1,4 +1,5 @@
 import { insertPlan } from '@/db/queries/plans';
+import { recordChange } from '@/lib/audit/record-change';
 import type { Actor } from '@/lib/auth/door';
 import { inTenant } from '@/lib/auth/in-tenant';
 import { applyDose, CONSTANTS_HASH, ENGINE_VERSION } from '@/lib/engine';
@@ -31,9 +32,11 @@ export async function savePlan(actor: Actor, input: PlanInput): Promise<{ planId
       'The plan on your screen no longer matches this sample. Load the page again and look at the new figures before saving.',
     );
   }
-  const planId = await inTenant(actor, (db) =>
-    insertPlan(db, {
-      id: newId('plan'),
+  const doses = [{ reagent: input.reagent, doseMgL: input.doseMgL }];
+  const ownId = newId('plan');
+  const planId = await inTenant(actor, async (db) => {
+    const kept = await insertPlan(db, {
+      id: ownId,
       organisationId: actor.organisation.id,
       plantId: plant.id,
       sampleId: sample.id,
@@ -49,8 +52,23 @@ export async function savePlan(actor: Actor, input: PlanInput): Promise<{ planId
       },
       reason: input.reason,
       createdBy: actor.personId,
-      doses: [{ reagent: input.reagent, doseMgL: input.doseMgL }],
-    }),
-  );
+      doses,
+    });
+    // A repeated send finds the first plan, and its entry.
+    if (kept === ownId) {
+      await recordChange(db, actor, {
+        action: 'plan.saved',
+        subjectId: kept,
+        detail: {
+          sampleId: sample.id,
+          target: input.target,
+          doses,
+          engineVersion: ENGINE_VERSION,
+          reason: input.reason,
+        },
+      });
+    }
+    return kept;
+  });
   return { planId };
 }

@@ -2,6 +2,7 @@ import type { ReactNode } from 'react';
 import { Masthead } from '@/components/shell/masthead';
 import { PlantTabs } from '@/components/shell/plant-tabs';
 import { pageActor } from '@/lib/auth/actor';
+import { roleMay } from '@/lib/auth/permissions';
 import { readPlants } from '@/lib/plants/read-plants';
 
 export default async function WorkspaceLayout({
@@ -22,7 +23,12 @@ export default async function WorkspaceLayout({
       >
         Skip to the page
       </a>
-      <Masthead organisation={actor.organisation} personName={actor.personName} role={actor.role} />
+      <Masthead
+        organisation={actor.organisation}
+        personName={actor.personName}
+        role={actor.role}
+        mayReadAudit={roleMay(actor.role, 'audit.read')}
+      />
       <PlantTabs
         organisationSlug={actor.organisation.slug}
         plants={plants.map(({ slug, name }) => ({ slug, name }))}

@@ -5,6 +5,10 @@ describe('the permission table', () => {
   it('is exactly this; a change must show in review', () => {
     expect(PERMISSIONS).toMatchInlineSnapshot(`
       {
+        "audit.read": [
+          "manager",
+          "owner",
+        ],
         "plan.read": [
           "operator",
           "consultant",
