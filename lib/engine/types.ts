@@ -154,6 +154,8 @@ export type DoseSuggestion =
   | {
       readonly ok: true;
       readonly doses: readonly { readonly doseMgL: number; readonly water: Water }[];
+      /** Speciations the search took. */
+      readonly evaluations?: number;
     }
   | (Refusal & { readonly reachable?: { readonly from: number; readonly to: number } });
 

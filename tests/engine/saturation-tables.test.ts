@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { riverWater, spread, waterOf } from './support';
-import { fillCoefficients } from '@/lib/engine/activity/coefficients';
+import { emptyTable, fillCoefficients, fillTable } from '@/lib/engine/activity/coefficients';
 import { classOf } from '@/lib/engine/activity/ion-class';
 import { debyeHuckelAt } from '@/lib/engine/activity/water-properties';
 import { CONSTANT_ROWS } from '@/lib/engine/constants/table';
@@ -17,7 +17,9 @@ const logK = (key: string, temperatureC: number): number => {
 function engineC(temperatureC: number, ionic: number): number {
   const groups = [classOf('Ca++', 2), classOf('HCO3-', -1)];
   const lnGamma = new Float64Array(2);
-  fillCoefficients(groups, debyeHuckelAt(temperatureC), ionic, lnGamma, new Float64Array(2));
+  const table = emptyTable(2);
+  fillTable(groups, debyeHuckelAt(temperatureC), table);
+  fillCoefficients(table, ionic, lnGamma, new Float64Array(2));
   const activities = ((lnGamma[0] ?? NaN) + (lnGamma[1] ?? NaN)) / Math.LN10;
   return -logK('CO3--', temperatureC) + logK('calcite', temperatureC) - activities;
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { fillCoefficients } from '@/lib/engine/activity/coefficients';
+import { emptyTable, fillCoefficients, fillTable } from '@/lib/engine/activity/coefficients';
 import type { IonClass } from '@/lib/engine/activity/ion-class';
 import {
   debyeHuckelAt,
@@ -49,9 +49,15 @@ describe('Debye–Hückel slopes', () => {
   });
 });
 
+const tableOf = (group: IonClass) => {
+  const table = emptyTable(1);
+  fillTable([group], debyeHuckelAt(25), table);
+  return table;
+};
+
 const coefficientOf = (group: IonClass, ionic: number): number => {
   const lnGamma = new Float64Array(1);
-  fillCoefficients([group], debyeHuckelAt(25), ionic, lnGamma, new Float64Array(1));
+  fillCoefficients(tableOf(group), ionic, lnGamma, new Float64Array(1));
   return Math.exp(lnGamma[0] ?? NaN);
 };
 
@@ -87,7 +93,7 @@ describe('single-ion activity coefficients', () => {
   ];
   it.each(groups)('$kind: the slope is the derivative', (group) => {
     const slope = new Float64Array(1);
-    fillCoefficients([group], debyeHuckelAt(25), 0.05, new Float64Array(1), slope);
+    fillCoefficients(tableOf(group), 0.05, new Float64Array(1), slope);
     const step = 1e-6;
     const rise =
       Math.log(coefficientOf(group, 0.05 + step)) - Math.log(coefficientOf(group, 0.05 - step));

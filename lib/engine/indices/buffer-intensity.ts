@@ -14,13 +14,14 @@ export function bufferIntensityOf(water: Water): number {
   const totals = totalsOf(water);
   const { workspace, ending } = solveClosed(water.temperatureC, totals, startOf(water));
   if (!ending.converged) return NaN;
-  const { matrix, right, pivots, stride, sums, scalars, system } = workspace;
+  const { matrix, right, pivots, stride, scalars, system } = workspace;
   const size = system.components.length + 1;
-  // The hydrogen row compares ln of acids and bases; at the solution both equal this sum.
-  const side = (sums[0] ?? 0) + (scalars[2] ?? 0) + Math.max(-(totals[HYDROGEN] ?? 0), 0);
+  const place = system.components.length - 1;
+  // Hydrogen stands last of the components; its row compares ln of acids and bases; at the solution both equal this sum.
+  const side = (scalars[2] ?? 0) + Math.max(-(totals[HYDROGEN] ?? 0), 0);
   right.fill(0);
-  right[0] = 1 / side;
+  right[place] = 1 / side;
   if (!factorise(matrix, size, stride, pivots)) return NaN;
   substitute(matrix, size, stride, pivots, right);
-  return (MEQ_PER_EQ * Math.LN10) / (right[0] ?? NaN);
+  return (MEQ_PER_EQ * Math.LN10) / (right[place] ?? NaN);
 }

@@ -47,9 +47,12 @@ export function doseForTarget(
       'target.quantity',
     );
   }
+  const tried = new Map<number, Water>();
   const valueAt = (doseMgL: number): number => {
     const solved = applyDose(water, { reagent, doseMgL });
-    return solved.ok ? (quantityOf(solved.water, target.quantity) ?? NaN) : NaN;
+    if (!solved.ok) return NaN;
+    tried.set(doseMgL, solved.water);
+    return quantityOf(solved.water, target.quantity) ?? NaN;
   };
   const looks: Point[] = [];
   for (const share of LOOK_AT) {
@@ -63,9 +66,10 @@ export function doseForTarget(
   return {
     ok: true,
     doses: doses.flatMap((doseMgL) => {
-      const solved = applyDose(water, { reagent, doseMgL });
-      return solved.ok ? [{ doseMgL, water: solved.water }] : [];
+      const there = tried.get(doseMgL);
+      return there ? [{ doseMgL, water: there }] : [];
     }),
+    evaluations: tried.size,
   };
 }
 

@@ -10,6 +10,9 @@ export interface Problem {
   readonly carbonRow: Row;
 }
 
+// Rows and columns of the matrix run over the components backwards, then ionic strength, then solids: the rare
+// components, which touch few others, are eliminated first and hydrogen, which touches all, last.
+
 /**
  * Fills the matrix and right side of one Newton step; returns the largest relative residual. `totals[0]` is minus the
  * alkalinity. Casts: see numeric/lu.ts.
@@ -34,9 +37,10 @@ export function assemble(w: Workspace, problem: Problem): number {
 function specialRow(w: Workspace, m: number, kind: Row, row: number): number {
   if (kind === 'alkalinity') return alkalinityRow(w, m, row);
   if (kind === 'carbon') return massRow(w, m, w.system.carbon, row);
-  w.matrix.fill(0, row * w.stride, row * w.stride + m + 1 + w.activeSolids);
-  w.matrix[row * w.stride + row] = 1;
-  w.right[row] = 0;
+  const place = m - 1 - row;
+  w.matrix.fill(0, place * w.stride, place * w.stride + m + 1 + w.activeSolids);
+  w.matrix[place * w.stride + place] = 1;
+  w.right[place] = 0;
   return 0;
 }
 
@@ -45,18 +49,20 @@ function massRow(w: Workspace, m: number, j: number, row: number): number {
   const { matrix, products, stride, activeSolids } = w;
   const sum = w.sums[j] as number;
   const total = w.totals[j] as number;
-  const base = row * stride;
+  const place = m - 1 - row;
+  const base = place * stride;
+  const last = base + m - 1;
   const scale = activeSolids === 0 ? sum : Math.max(sum, total);
   const inverse = 1 / scale;
-  for (let k = 0; k < j; k++) matrix[base + k] = (products[k * m + j] as number) * inverse;
-  for (let k = j; k < m; k++) matrix[base + k] = (products[j * m + k] as number) * inverse;
+  for (let k = 0; k < j; k++) matrix[last - k] = (products[k * m + j] as number) * inverse;
+  for (let k = j; k < m; k++) matrix[last - k] = (products[j * m + k] as number) * inverse;
   matrix[base + m] = -(w.byIonic[j] as number) * inverse;
   if (activeSolids === 0) {
-    w.right[row] = Math.log(total / sum);
+    w.right[place] = Math.log(total / sum);
     return Math.abs(sum - total) / Math.max(total, sum);
   }
   const left = total - inSolids(w, m, j, base, inverse);
-  w.right[row] = (left - sum) * inverse;
+  w.right[place] = (left - sum) * inverse;
   return Math.abs(left - sum) * inverse;
 }
 
@@ -73,30 +79,32 @@ function inSolids(w: Workspace, m: number, j: number, base: number, inverse: num
 
 /** acids + alkalinity = bases. Without solids compared as logarithms, each side being a sum of positive terms. */
 function alkalinityRow(w: Workspace, m: number, row: number): number {
-  const { matrix, products, basic, stride, activeSolids } = w;
+  const { matrix, products, acid, stride, activeSolids } = w;
   const alkalinity = -(w.totals[0] as number);
-  const bases = w.scalars[2] as number;
-  const acids = (w.sums[0] as number) + bases;
+  const acids = w.scalars[2] as number;
+  const bases = acids - (w.sums[0] as number);
   const left = acids + Math.max(alkalinity, 0);
   const right = bases + Math.max(-alkalinity, 0);
-  const base = row * stride;
+  const place = m - 1 - row;
+  const base = place * stride;
+  const last = base + m - 1;
   if (activeSolids > 0) {
     const inverse = 1 / Math.max(left, right);
-    for (let k = 0; k < m; k++) matrix[base + k] = (products[k] as number) * inverse;
+    for (let k = 0; k < m; k++) matrix[last - k] = (products[k] as number) * inverse;
     matrix[base + m] = -(w.byIonic[0] as number) * inverse;
     const excess = left - right + inSolids(w, m, 0, base, inverse);
-    w.right[row] = -excess * inverse;
+    w.right[place] = -excess * inverse;
     return Math.abs(excess) * inverse;
   }
   const byLeft = 1 / left;
   const byRight = 1 / right;
   for (let k = 0; k < m; k++) {
-    const short = basic[k] as number;
-    matrix[base + k] = ((products[k] as number) + short) * byLeft - short * byRight;
+    const over = acid[k] as number;
+    matrix[last - k] = over * byLeft - (over - (products[k] as number)) * byRight;
   }
-  const short = basic[m] as number;
-  matrix[base + m] = -((w.byIonic[0] as number) + short) * byLeft + short * byRight;
-  w.right[row] = Math.log(right / left);
+  const over = acid[m] as number;
+  matrix[base + m] = (over - (w.byIonic[0] as number)) * byRight - over * byLeft;
+  w.right[place] = Math.log(right / left);
   return Math.abs(left - right) / Math.max(left, right);
 }
 
@@ -107,7 +115,7 @@ function ionicRow(w: Workspace, m: number): number {
   const found = scalars[0] as number;
   const inverse = 1 / Math.max(found, ionic);
   const base = m * stride;
-  for (let k = 0; k < m; k++) matrix[base + k] = (ionicBy[k] as number) * inverse;
+  for (let k = 0; k < m; k++) matrix[base + m - 1 - k] = (ionicBy[k] as number) * inverse;
   matrix[base + m] = (-1 - (scalars[1] as number)) * inverse;
   for (let s = 0; s < activeSolids; s++) matrix[base + m + 1 + s] = 0;
   w.right[m] = (ionic - found) * inverse;
@@ -123,7 +131,7 @@ function solidRow(w: Workspace, m: number, row: number): number {
   let lnProduct = 0;
   for (let k = 0; k < m; k++) {
     const count = solidCounts[s * m + k] as number;
-    matrix[base + k] = count;
+    matrix[base + m - 1 - k] = count;
     lnProduct += count * (unknowns[k] as number);
   }
   const gap = (w.solidLnK[s] as number) - lnProduct;

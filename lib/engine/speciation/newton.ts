@@ -82,14 +82,15 @@ function stepBack(workspace: Workspace, size: number): void {
 function step(workspace: Workspace, size: number): void {
   const { unknowns, right, held } = workspace;
   const m = workspace.system.components.length;
-  let share = Math.min(1, HYDROGEN_STEP / Math.abs(right[0] as number));
-  for (let k = 1; k < m; k++) {
-    share = Math.min(share, ACTIVITY_STEP / Math.abs(right[k] as number));
+  let share = Math.min(1, HYDROGEN_STEP / Math.abs(right[m - 1] as number));
+  for (let place = 0; place < m - 1; place++) {
+    share = Math.min(share, ACTIVITY_STEP / Math.abs(right[place] as number));
   }
   for (let k = 0; k < size; k++) {
     const from = unknowns[k] as number;
     held[k] = from;
-    unknowns[k] = from + share * (right[k] as number);
+    // Components stand backwards in the matrix (see assemble.ts).
+    unknowns[k] = from + share * (right[k < m ? m - 1 - k : k] as number);
   }
   const ionic = held[m] as number;
   unknowns[m] = Math.min(

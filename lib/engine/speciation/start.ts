@@ -1,5 +1,4 @@
-import { COMPONENT_KEYS, COMPONENTS, CARBON, HYDROGEN } from '../constants/components';
-import { chargeOf } from '../constants/notation';
+import { CARBON, HYDROGEN } from '../constants/components';
 import type { Problem } from './assemble';
 import { evaluate } from './evaluate';
 import type { Workspace } from './workspace';
@@ -19,7 +18,6 @@ export interface Guess {
   readonly lnCarbonDioxide?: number;
 }
 
-const CHARGE_SQUARED = Float64Array.from(COMPONENT_KEYS, (k) => chargeOf(COMPONENTS[k]) ** 2);
 const LEAST_IONIC = 1e-7;
 /** While Newton is still far off, ionic strength is kept below this many times the first guess. */
 const IONIC_ROOM = 3;
@@ -42,9 +40,9 @@ export function guess(workspace: Workspace, given: Guess): void {
   let ionic = 0.5 * Math.abs(totals[HYDROGEN] as number);
   ionic += 0.5 * Math.abs(hydrogenSum(workspace, HYDROGEN, lnH)) + Math.exp(lnH);
   for (let j = 1; j < m; j++) {
-    const total = totals[j] as number;
-    unknowns[j] = Math.log(total / freeDivisor(workspace, j, lnH));
-    ionic += 0.5 * (CHARGE_SQUARED[system.components[j] as number] as number) * total;
+    const free = (totals[j] as number) / freeDivisor(workspace, j, lnH);
+    unknowns[j] = Math.log(free);
+    ionic += 0.5 * free * chargeSum(workspace, j, lnH);
   }
   if (system.carbon > 0) ionic += guessCarbon(workspace, given, lnH);
   unknowns[m] = Math.max(ionic, LEAST_IONIC);
@@ -73,6 +71,20 @@ function freeDivisor({ system, lnK }: Workspace, column: number, lnH: number): n
   for (let p = system.aloneStart[column] as number; p < to; p++) {
     const i = system.alone[p] as number;
     sum += Math.exp((lnK[i] as number) + (system.hydrogen[i] as number) * lnH);
+  }
+  return sum;
+}
+
+/** Σ z²·K·h^n over a component's own species: twice their ionic strength per free component. */
+function chargeSum({ system, lnK }: Workspace, column: number, lnH: number): number {
+  let sum = 0;
+  const to = system.aloneStart[column + 1] as number;
+  for (let p = system.aloneStart[column] as number; p < to; p++) {
+    const i = system.alone[p] as number;
+    const z = system.charges[i] as number;
+    if (z !== 0) {
+      sum += z * z * Math.exp((lnK[i] as number) + (system.hydrogen[i] as number) * lnH);
+    }
   }
   return sum;
 }

@@ -2,9 +2,17 @@ import { classOf, type IonClass } from '../activity/ion-class';
 import { COMPONENT_KEYS } from '../constants/components';
 import { SOLIDS, SPECIES, type Entry } from '../constants/table';
 
+/** Sums over species: entry e is Σ factor · molality of owner over the run from[e] … from[e + 1], and goes to at[e]. */
+export interface Gather {
+  readonly at: Int32Array;
+  readonly from: Int32Array;
+  readonly factor: Float64Array;
+  readonly owner: Int32Array;
+}
+
 /**
- * The species and solids that can exist with a set of components, laid out for the solver. Column 0 is always H+;
- * the composition of species i is the run start[i] … start[i + 1] of `column` and `count`.
+ * The species and solids that can exist with a set of components, laid out for the solver in flat lists, which the
+ * processor runs through without branching. Column 0 is always H+.
  */
 export interface System {
   /** Index into COMPONENT_KEYS of each column. */
@@ -13,11 +21,18 @@ export interface System {
   readonly carbon: number;
   readonly species: readonly Entry[];
   readonly charges: Float64Array;
-  readonly start: Int32Array;
-  readonly column: Int32Array;
+  /** Composition by component: run from[j] … from[j + 1] of `count` moles in species `owner`. */
+  readonly from: Int32Array;
+  readonly owner: Int32Array;
   readonly count: Float64Array;
+  /** Σ count · count · molality over the upper triangle (row-major). */
+  readonly pairs: Gather;
+  /** The same for the species that hold H+ over the basis, in the hydrogen row alone. */
+  readonly acidPairs: Gather;
   /** Moles of H+ in each species over the basis. */
   readonly hydrogen: Float64Array;
+  /** Species that hold more H+ than the basis. */
+  readonly acids: Int32Array;
   readonly classes: readonly IonClass[];
   readonly classIndex: Int32Array;
   /** Species of one mole of a component and H+ alone: run aloneStart[j] … aloneStart[j + 1] of `alone`, per column. */
@@ -46,7 +61,7 @@ function compile(mask: number): System {
   const components = COMPONENT_KEYS.map((_, i) => i).filter((i) => (mask & (1 << i)) !== 0);
   const columnOf = new Map(components.map((component, column) => [component, column]));
   const species = SPECIES.filter((entry) => possible(entry, mask));
-  const start = new Int32Array(species.length + 1);
+  const owners: number[] = [];
   const columns: number[] = [];
   const counts: number[] = [];
   const classes: IonClass[] = [];
@@ -56,10 +71,10 @@ function compile(mask: number): System {
     entry.composition.forEach((count, component) => {
       const column = columnOf.get(component);
       if (count === 0 || column === undefined) return;
+      owners.push(i);
       columns.push(column);
       counts.push(count);
     });
-    start[i + 1] = columns.length;
     const group = classOf(entry.key, entry.charge);
     const name = JSON.stringify(group);
     const found = names.indexOf(name);
@@ -77,10 +92,12 @@ function compile(mask: number): System {
     carbon: columnOf.get(1) ?? -1,
     species,
     charges: Float64Array.from(species, (entry) => entry.charge),
-    start,
-    column: Int32Array.from(columns),
-    count: Float64Array.from(counts),
+    ...byComponent(components.length, owners, columns, counts),
+    ...pairsOf(components.length, owners, columns, counts),
     hydrogen: Float64Array.from(species, (entry) => entry.composition[0] ?? 0),
+    acids: Int32Array.from(
+      [...species.keys()].filter((i) => (species[i]?.composition[0] ?? 0) > 0),
+    ),
     classes,
     classIndex,
     solids: SOLIDS.filter((entry) => possible(entry, mask)),
@@ -99,4 +116,56 @@ function speciesAlone(components: readonly number[], species: readonly Entry[]) 
     aloneStart[column + 1] = alone.length;
   });
   return { alone: Int32Array.from(alone), aloneStart };
+}
+
+function byComponent(
+  m: number,
+  owners: readonly number[],
+  columns: readonly number[],
+  counts: readonly number[],
+) {
+  const order = columns.map((_, p) => p).sort((a, b) => (columns[a] ?? 0) - (columns[b] ?? 0));
+  const from = new Int32Array(m + 1);
+  for (const column of columns) from[column + 1] = (from[column + 1] ?? 0) + 1;
+  for (let j = 0; j < m; j++) from[j + 1] = (from[j + 1] ?? 0) + (from[j] ?? 0);
+  return {
+    from,
+    owner: Int32Array.from(order, (p) => owners[p] ?? 0),
+    count: Float64Array.from(order, (p) => counts[p] ?? 0),
+  };
+}
+
+/** Products of counts within each species, and those with the H+ it holds over the basis. */
+function pairsOf(
+  m: number,
+  owners: readonly number[],
+  columns: readonly number[],
+  counts: readonly number[],
+) {
+  const pairs: [at: number, factor: number, owner: number][] = [];
+  const acids: [column: number, factor: number, owner: number][] = [];
+  owners.forEach((owner, p) => {
+    for (let q = p; owners[q] === owner; q++) {
+      const row = columns[p] ?? 0;
+      const column = columns[q] ?? 0;
+      const factor = (counts[p] ?? 0) * (counts[q] ?? 0);
+      pairs.push([row * m + column, factor, owner]);
+      if (row === 0 && (counts[p] ?? 0) > 0) acids.push([column, factor, owner]);
+    }
+  });
+  return { pairs: gather(pairs), acidPairs: gather(acids) };
+}
+
+type Term = readonly [at: number, factor: number, owner: number];
+
+function gather(terms: readonly Term[]): Gather {
+  const sorted = [...terms].sort((a, b) => a[0] - b[0]);
+  const at = [...new Set(sorted.map(([place]) => place))];
+  const from = at.map((place) => sorted.findIndex((term) => term[0] === place));
+  return {
+    at: Int32Array.from(at),
+    from: Int32Array.from([...from, sorted.length]),
+    factor: Float64Array.from(sorted, ([, factor]) => factor),
+    owner: Int32Array.from(sorted, ([, , owner]) => owner),
+  };
 }

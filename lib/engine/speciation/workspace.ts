@@ -1,4 +1,5 @@
-import { debyeHuckelAt, type DebyeHuckel } from '../activity/water-properties';
+import { emptyTable, fillTable, type CoefficientTable } from '../activity/coefficients';
+import { debyeHuckelAt } from '../activity/water-properties';
 import { constantsAt } from './equilibrium-constants';
 import type { System } from './system';
 
@@ -10,6 +11,10 @@ export interface Workspace {
   readonly totals: Float64Array;
   readonly lnK: Float64Array;
   readonly molality: Float64Array;
+  /** Molality times the slope of its ln γ, and ½ z² times molality. */
+  readonly steep: Float64Array;
+  readonly half: Float64Array;
+  readonly coefficients: CoefficientTable;
   readonly lnGamma: Float64Array;
   readonly slope: Float64Array;
   /** Σ count · molality per component. */
@@ -20,9 +25,9 @@ export interface Workspace {
   readonly byIonic: Float64Array;
   /** Derivative of ½ Σ z² m by ln activity of each component. */
   readonly ionicBy: Float64Array;
-  /** The part of the hydrogen row that comes from species short of H+, counted positive; last entry by ionic strength. */
-  readonly basic: Float64Array;
-  /** [½ Σ z² m, minus its derivative by ionic strength, Σ of basic species]. */
+  /** The part of the hydrogen row that comes from species holding H+ over the basis; last entry by ionic strength. */
+  readonly acid: Float64Array;
+  /** [½ Σ z² m, minus its derivative by ionic strength, Σ H+ held over the basis]. */
   readonly scalars: Float64Array;
   readonly matrix: Float64Array;
   readonly right: Float64Array;
@@ -37,7 +42,6 @@ export interface Workspace {
   /** Ionic strength may not pass this in a step, mol/kg. */
   ionicBound: number;
   temperatureC: number;
-  debyeHuckel: DebyeHuckel;
 }
 
 const workspaces = new WeakMap<System, Workspace>();
@@ -61,13 +65,16 @@ function allocate(system: System): Workspace {
     totals: new Float64Array(m),
     lnK: new Float64Array(n),
     molality: new Float64Array(n),
+    steep: new Float64Array(n),
+    half: new Float64Array(n),
+    coefficients: emptyTable(system.classes.length),
     lnGamma: new Float64Array(system.classes.length),
     slope: new Float64Array(system.classes.length),
     sums: new Float64Array(m),
     products: new Float64Array(m * m),
     byIonic: new Float64Array(m),
     ionicBy: new Float64Array(m),
-    basic: new Float64Array(m + 1),
+    acid: new Float64Array(m + 1),
     scalars: new Float64Array(3),
     matrix: new Float64Array(stride * stride),
     right: new Float64Array(stride),
@@ -79,7 +86,6 @@ function allocate(system: System): Workspace {
     activeSolids: 0,
     ionicBound: Infinity,
     temperatureC: NaN,
-    debyeHuckel: { a: 0, b: 0 },
   };
 }
 
@@ -87,7 +93,7 @@ function setTemperature(workspace: Workspace, temperatureC: number): void {
   if (workspace.temperatureC === temperatureC) return;
   const constants = constantsAt(temperatureC);
   workspace.temperatureC = temperatureC;
-  workspace.debyeHuckel = debyeHuckelAt(temperatureC);
+  fillTable(workspace.system.classes, debyeHuckelAt(temperatureC), workspace.coefficients);
   workspace.system.species.forEach((entry, i) => {
     workspace.lnK[i] = Math.LN10 * (constants.species.get(entry.key) ?? 0);
   });
