@@ -1,7 +1,6 @@
 import type { Metadata, Viewport } from 'next';
 import { cookies } from 'next/headers';
 import type { ReactNode } from 'react';
-import { NuqsAdapter } from 'nuqs/adapters/next/app';
 import { isTheme, THEME_COOKIE } from '@/lib/theme';
 import { figureFont, headingFont, textFont } from './fonts';
 import './globals.css';
@@ -21,9 +20,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
       data-theme={isTheme(chosen) ? chosen : undefined}
       className={`${textFont.variable} ${figureFont.variable} ${headingFont.variable}`}
     >
-      <body>
-        <NuqsAdapter>{children}</NuqsAdapter>
-      </body>
+      <body>{children}</body>
     </html>
   );
 }

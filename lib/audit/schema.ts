@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 
 /** The closed list of what is written down, each with what it tells. */
 export const auditChange = z.discriminatedUnion('action', [

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { REAGENTS, type ReagentKey, type TargetQuantity } from '@/lib/engine';
 import { readMeasurement } from '@/lib/samples/read-measurement';
 import { TARGET_KEYS } from './quantities';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { checkResult } from './check-result';
 import { QUANTITY_KEYS, type QuantityKey } from './quantities';
 import { QUALIFIERS, type Qualifier } from './solve-sample';

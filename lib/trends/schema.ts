@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { isSeriesKey, type SeriesKey } from '@/lib/samples/describe';
 import type { Qualifier } from '@/lib/samples/solve-sample';
 

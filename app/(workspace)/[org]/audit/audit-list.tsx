@@ -21,7 +21,9 @@ export function AuditList({ entries }: { entries: readonly AuditEntry[] }) {
               <span className="figure text-sm text-ink-soft">{entry.subjectId}</span>
             </p>
             <details className="text-sm">
-              <summary className="flex min-h-8 items-center text-verdigris">▸ What was written</summary>
+              <summary className="flex min-h-8 items-center text-verdigris">
+                ▸ What was written
+              </summary>
               <pre className="mt-1 overflow-x-auto font-figure text-[0.85rem]" tabIndex={0}>
                 {JSON.stringify(entry.detail, null, 2)}
               </pre>
