@@ -46,3 +46,4 @@ export {
   type Sampling,
   type Uncertainty,
 } from './uncertainty/how-sure';
+export { copperSolubilityOf, leadSolubilityOf, type Solubility } from './indices/metal-solubility';
