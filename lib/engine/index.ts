@@ -7,6 +7,7 @@ export { formatSpecies } from './constants/notation';
 export { REAGENTS, type ReagentInfo } from './reagents/catalogue';
 export { solveWater } from './speciation/solve-water';
 export { indicesOf } from './indices/indices-of';
+export { INDEX_NOTES, type IndexNote } from './indices/index-notes';
 export { precipitationPotentialAt } from './solids/precipitation-potential';
 export { equilibrateWith } from './solids/equilibrate-with';
 export { applyDose, applyDoses } from './steps/dose';
