@@ -10,6 +10,9 @@ export interface Problem {
   readonly carbonRow: Row;
 }
 
+/** Within this of 1 the series of the logarithm is off by less than 3e-9. */
+const SERIES = 0.01;
+
 // Rows and columns of the matrix run over the components backwards, then ionic strength, then solids: the rare
 // components, which touch few others, are eliminated first and hydrogen, which touches all, last.
 
@@ -58,12 +61,18 @@ function massRow(w: Workspace, m: number, j: number, row: number): number {
   for (let k = j; k < m; k++) matrix[last - k] = (products[j * m + k] as number) * inverse;
   matrix[base + m] = -(w.byIonic[j] as number) * inverse;
   if (activeSolids === 0) {
-    w.right[place] = Math.log(total / sum);
+    w.right[place] = lnRatio(total, sum);
     return Math.abs(sum - total) / Math.max(total, sum);
   }
   const left = total - inSolids(w, m, j, base, inverse);
   w.right[place] = (left - sum) * inverse;
   return Math.abs(left - sum) * inverse;
+}
+
+/** ln(a / b); near 1 by its series to the third power, which is all a Newton step needs and costs no logarithm. */
+function lnRatio(a: number, b: number): number {
+  const d = (a - b) / b;
+  return Math.abs(d) < SERIES ? d * (1 - d * (0.5 - d / 3)) : Math.log(a / b);
 }
 
 /** Amount of component j held by the solids; writes the derivatives by their moles into the row. */
@@ -104,7 +113,7 @@ function alkalinityRow(w: Workspace, m: number, row: number): number {
   }
   const over = acid[m] as number;
   matrix[base + m] = (over - (w.byIonic[0] as number)) * byRight - over * byLeft;
-  w.right[place] = Math.log(right / left);
+  w.right[place] = lnRatio(right, left);
   return Math.abs(left - right) / Math.max(left, right);
 }
 
