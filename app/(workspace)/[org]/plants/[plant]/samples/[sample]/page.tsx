@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
 import { IndexList } from '@/components/ledger/index-list';
+import { IndexNotes } from '@/components/ledger/index-notes';
 import { buttonClass } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { PageHeading } from '@/components/ui/page-heading';
@@ -9,7 +10,10 @@ import { formatDayTime } from '@/lib/format';
 import { paths } from '@/lib/paths';
 import { getSample } from '@/lib/samples/get-sample';
 import { INDEX_KEYS } from '@/lib/samples/indices';
+import { measuredValues } from '@/lib/samples/measured-values';
+import { solveSample } from '@/lib/samples/solve-sample';
 import { orNotFound, pagePlant } from '../../page-plant';
+import { MetalSolubility } from './metal-solubility';
 import { ResultTable } from './result-table';
 
 export const metadata: Metadata = { title: 'Sample' };
@@ -22,6 +26,7 @@ export default async function SamplePage({
   const { actor, plant } = await pagePlant(params, 'sample.read');
   const sample = await orNotFound(getSample(actor, plant, (await params).sample));
   const organisationSlug = actor.organisation.slug;
+  const solved = solveSample(measuredValues(sample.results));
   const isSolved = sample.solution !== null && sample.solution.refusal === null;
   return (
     <>
@@ -70,7 +75,11 @@ export default async function SamplePage({
             What this water says
           </h2>
           {isSolved ? (
-            <IndexList indices={sample.indices} shown={INDEX_KEYS} />
+            <>
+              <IndexList indices={sample.indices} shown={INDEX_KEYS} />
+              <IndexNotes shown={INDEX_KEYS} />
+              {solved.ok ? <MetalSolubility water={solved.water} /> : null}
+            </>
           ) : (
             <div className="mt-2">
               <Notice tone="watch" title="Not solved">
