@@ -2,6 +2,9 @@ import { copperSolubilityOf, leadSolubilityOf, type Solubility, type Water } fro
 import { Figure } from '@/components/ui/figure';
 import { formatSignificant } from '@/lib/format';
 
+/** Above this the metal is no trace any more, and the model that takes it for one says nothing. */
+const MOST_MG_L = 20;
+
 /** Lead and copper as what they are: a model's equilibrium with a named solid, never a verdict on the tap. */
 export function MetalSolubility({ water }: { water: Water }) {
   const metals = [
@@ -36,7 +39,11 @@ function MetalTable({ name, rows }: { name: string; rows: readonly Solubility[] 
               with {solid.replaceAll('-', ' ')}
             </th>
             <td className="py-1 text-right">
-              <Figure unit="mg/L">{formatSignificant(mgL, 2)}</Figure>
+              {mgL > MOST_MG_L ? (
+                <span className="text-ink-soft">does not hold in this water</span>
+              ) : (
+                <Figure unit="mg/L">{formatSignificant(mgL, 2)}</Figure>
+              )}
             </td>
           </tr>
         ))}
