@@ -6,6 +6,7 @@ export const ERROR_STATUS = {
   notFound: 404,
   conflict: 409,
   engineRefused: 422,
+  tooMany: 429,
   internal: 500,
 } as const;
 

@@ -34,7 +34,7 @@ export function ReactionAccount({ reactions }: { reactions: readonly LedgerReact
             </tr>
           </thead>
           <tbody>
-            {ran.map(({ key, equation, extentMolKg, logK, logQuotient, source }) => (
+            {ran.map(({ key, equation, extentMolKg, logK, logQuotient, source, complete }) => (
               <tr key={key} className="border-b border-rule last:border-b-0">
                 <th scope="row" className="py-1 text-left font-normal whitespace-nowrap">
                   <Formula>{equation}</Formula>
@@ -42,8 +42,16 @@ export function ReactionAccount({ reactions }: { reactions: readonly LedgerReact
                 <td className="figure py-1 pl-4 text-right">
                   {formatChange(extentMolKg * MICROMOL_PER_MOL, 3)}
                 </td>
-                <td className="figure py-1 pl-4 text-right">{formatNumber(logK, 4)}</td>
-                <td className="figure py-1 pl-4 text-right">{formatNumber(logQuotient, 4)}</td>
+                {complete === true ? (
+                  <td colSpan={2} className="py-1 pl-4 text-right text-sm text-ink-soft">
+                    ran to its end
+                  </td>
+                ) : (
+                  <>
+                    <td className="figure py-1 pl-4 text-right">{formatNumber(logK, 4)}</td>
+                    <td className="figure py-1 pl-4 text-right">{formatNumber(logQuotient, 4)}</td>
+                  </>
+                )}
                 <td className="py-1 pl-6 text-sm text-ink-soft">{source}</td>
               </tr>
             ))}

@@ -1,5 +1,6 @@
 import type { NextAuthOptions } from 'next-auth';
 import CredentialsProvider from 'next-auth/providers/credentials';
+import { AppError } from '@/lib/errors';
 import { paths } from '@/lib/paths';
 import { checkSignIn } from './check-sign-in';
 
@@ -17,7 +18,15 @@ export const authOptions: NextAuthOptions = {
   providers: [
     CredentialsProvider({
       credentials: { email: {}, password: {} },
-      authorize: (credentials) => checkSignIn(credentials),
+      // A sentence thrown here reaches the form; a wrong pair is null and tells nothing.
+      authorize: async (credentials) => {
+        try {
+          return await checkSignIn(credentials);
+        } catch (error) {
+          if (error instanceof AppError) throw new Error(error.userMessage, { cause: error });
+          throw error;
+        }
+      },
     }),
   ],
   callbacks: {

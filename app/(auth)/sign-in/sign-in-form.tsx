@@ -1,7 +1,7 @@
 'use client';
 
 import { zodResolver } from '@hookform/resolvers/zod';
-import { signIn } from 'next-auth/react';
+import { signIn, type SignInResponse } from 'next-auth/react';
 import { useRouter } from 'next/navigation';
 import { useForm } from 'react-hook-form';
 import { TextField } from '@/components/forms/text-field';
@@ -27,10 +27,7 @@ export function SignInForm() {
       return;
     }
     form.setError('root', {
-      message:
-        answer?.status === 401
-          ? 'This e-mail and password do not belong together. Check both and try again.'
-          : 'Marlwick did not answer. Check the connection and try again.',
+      message: refusalWords(answer),
     });
   });
 
@@ -60,4 +57,12 @@ export function SignInForm() {
       </Button>
     </form>
   );
+}
+
+/** What next-auth answered, in words: its own for a wrong pair, the server's sentence for a closed address. */
+function refusalWords(answer: SignInResponse | undefined): string {
+  if (answer?.status !== 401) return 'Marlwick did not answer. Check the connection and try again.';
+  return answer.error === null || answer.error === undefined || answer.error === 'CredentialsSignin'
+    ? 'This e-mail and password do not belong together. Check both and try again.'
+    : answer.error;
 }
