@@ -13,6 +13,7 @@ export { equilibrateWith } from './solids/equilibrate-with';
 export { applyDose, applyDoses } from './steps/dose';
 export { doseForTarget } from './planning/dose-for-target';
 export { accountFor } from './ledger/account-for';
+export { accountForStep, type StepTaken } from './ledger/account-for-step';
 export { convert, UNITS, type Converted, type QuantityKind, type UnitOf } from './units';
 export { blend, type Stream } from './steps/blend';
 export { heat } from './steps/heat';
