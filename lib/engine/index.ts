@@ -5,6 +5,7 @@ export { CONSTANTS_HASH } from './constants/table';
 export { ANALYTES, type AnalyteInfo } from './constants/analytes';
 export { formatSpecies } from './constants/notation';
 export { REAGENTS, type ReagentInfo } from './reagents/catalogue';
+export { checkProduct, dosesOfProduct, productFor, type Product } from './reagents/product';
 export { solveWater } from './speciation/solve-water';
 export { indicesOf } from './indices/indices-of';
 export { INDEX_NOTES, type IndexNote } from './indices/index-notes';

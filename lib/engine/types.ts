@@ -121,7 +121,13 @@ export type ReagentKey =
   | 'phosphoric-acid'
   | 'sodium-silicate'
   | 'ammonia'
-  | 'sodium-bisulfite';
+  | 'sodium-bisulfite'
+  | 'polyaluminum-chloride'
+  | 'ammonium-sulfate'
+  | 'sodium-hexafluorosilicate'
+  | 'monosodium-phosphate'
+  | 'zinc-sulfate'
+  | 'zinc-chloride';
 
 /** A dose in mg/L of the pure compound (chlorine products: as Cl2). */
 export interface Dose {
@@ -129,6 +135,8 @@ export interface Dose {
   readonly doseMgL: number;
   /** Water of hydration of the compound as weighed, mol/mol; without it the reagent's usual one (see REAGENTS). */
   readonly hydrate?: number;
+  /** Of polyaluminium chloride: share (0…0.9) of the chloride replaced by hydroxide; 0.5 when left out. */
+  readonly basicity?: number;
 }
 
 /** Quantities a dose can be asked to reach. */

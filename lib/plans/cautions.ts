@@ -43,6 +43,9 @@ const HAZARDS: Partial<Record<ReagentKey, readonly Hazard[]>> = {
   'calcium-hypochlorite': ['chlorine'],
   ammonia: ['ammonia'],
   'sodium-bisulfite': ['acid'],
+  'polyaluminum-chloride': ['acid'],
+  'sodium-hexafluorosilicate': ['fluoride'],
+  'ammonium-sulfate': ['ammonia'],
 };
 
 /** The cautions of one reagent, by its hazards; the safety data sheet is always named. */

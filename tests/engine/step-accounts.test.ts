@@ -101,6 +101,31 @@ describe('the account of a step closes', () => {
     expectClosed(accountOf(step, oxidised.water), oxidised.water);
   });
 
+  it.each([
+    ['oxygen', {}],
+    ['permanganate', { permanganateMgL: 2 }],
+  ] as const)('when %s oxidises iron and manganese: nothing ends below zero', (oxidant, fed) => {
+    const before = waterOf({
+      ...riverWater,
+      analytesMgL: { ...riverWater.analytesMgL, iron: 0.8, manganese: 0.2 },
+    });
+    const oxidised = oxidise(before, { oxidant, ...fed });
+    if (!oxidised.ok) throw new Error(oxidised.message);
+    const ledger = accountOf(
+      { kind: 'oxidise', before, reactions: oxidised.reactions },
+      oxidised.water,
+    );
+    expectClosed(ledger, oxidised.water);
+    for (const { key, equilibrium } of ledger.species) {
+      expect(equilibrium, key).toBeGreaterThanOrEqual(-1e-15);
+    }
+    expect(oxidised.water.totalsMolKg['Fe2'] ?? 0).toBe(0);
+    expect(oxidised.water.totalsMolKg['Mn'] ?? 0).toBe(0);
+    expect(
+      Math.abs((oxidised.water.totalsMolKg['charge'] ?? 0) - (before.totalsMolKg['charge'] ?? 0)),
+    ).toBeLessThan(1e-12);
+  });
+
   it('for any water that is heated and aired', () => {
     fc.assert(
       fc.property(anyWater, fc.double({ min: 1, max: 40, noNaN: true }), (analysis, celsius) => {

@@ -36,8 +36,12 @@ export function readDoses(request: Json): readonly Dose[] | Refusal {
   const doses: Dose[] = [];
   for (const [i, entry] of list.entries()) {
     if (!isJson(entry)) return refuse('badInput', 'A dose is needed.', `doses.${i}`);
-    const { reagent, dose: doseMgL, hydrate } = entry;
-    doses.push({ reagent, doseMgL, ...(hydrate === undefined ? {} : { hydrate }) } as Dose);
+    const { reagent, dose: doseMgL, hydrate, basicity } = entry;
+    const more = {
+      ...(hydrate === undefined ? {} : { hydrate }),
+      ...(basicity === undefined ? {} : { basicity }),
+    };
+    doses.push({ reagent, doseMgL, ...more } as Dose);
   }
   return doses;
 }

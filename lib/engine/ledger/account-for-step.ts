@@ -40,7 +40,7 @@ export function accountForStep(
     case 'precipitate':
       return balance(step.before.speciesMolKg, after, formed(after));
     case 'oxidise':
-      return balance(step.before.speciesMolKg, after, step.reactions);
+      return balance(withOxidant(step.before, step.reactions), after, step.reactions);
   }
 }
 
@@ -57,6 +57,27 @@ function blended(
     }
   }
   return balance(amounts, after, []);
+}
+
+/** Oxidants from outside the water's own species: what the reactions used up of them stood there before, as fed. */
+const FROM_OUTSIDE = ['O2', 'MnO4-'] as const;
+
+function withOxidant(
+  before: Water,
+  reactions: readonly CompleteReaction[],
+): Readonly<Record<string, number>> {
+  const amounts: Record<string, number> = { ...before.speciesMolKg };
+  for (const key of FROM_OUTSIDE) {
+    const used = reactions.reduce(
+      (sum, { coefficients, extentMolKg }) => sum - (coefficients[key] ?? 0) * extentMolKg,
+      0,
+    );
+    if (used === 0) continue;
+    amounts[key] = used;
+    // Permanganate is fed as its potassium salt.
+    if (key === 'MnO4-') amounts['K+'] = (amounts['K+'] ?? 0) + used;
+  }
+  return amounts;
 }
 
 /** Solids that left the water, each by its own reaction turned round. */

@@ -40,8 +40,16 @@ const asChlorine = { molarMassGMol: molarMassGMol('Cl2'), doseBasis: 'as Cl2' } 
 /** g/mol of water of hydration. */
 export const WATER_G_MOL = molarMassGMol('H2O');
 
+/** What two moles of aluminium of a polyaluminium chloride bring, by its basicity. */
+export function polyaluminumChloride(basicity: number): Record<string, number> {
+  return { 'Al+++': 2, 'OH-': 6 * basicity, 'Cl-': 6 * (1 - basicity) };
+}
+
 /** Usual hydration of commercial aluminium sulfate, mol of water per mol. */
 export const ALUM_HYDRATE = 14.3;
+
+/** Basicity of a common polyaluminium chloride; products run from 0.1 to 0.83. */
+export const PACL_BASICITY = 0.5;
 
 /** Every pure compound the engine can feed. Strengths and products are the plant's own matter. */
 export const REAGENTS: Readonly<Record<ReagentKey, ReagentInfo>> = {
@@ -167,6 +175,38 @@ export const REAGENTS: Readonly<Record<ReagentKey, ReagentInfo>> = {
       note: 'Reacts at once with free chlorine to sulfate and chloride; any rest stays as sulfite.',
     },
   ),
+  'polyaluminum-chloride': reagent(
+    'polyaluminum-chloride',
+    'polyaluminium chloride',
+    'Al2(OH)3Cl3',
+    polyaluminumChloride(PACL_BASICITY),
+    {
+      molarMassGMol: molarMassGMol('Al2O3'),
+      doseBasis: 'as Al2O3',
+      precipitates: { solid: 'aluminum-hydroxide', molPerMol: 2 },
+      note: 'Written at a basicity of one half; the product’s own replaces it.',
+    },
+  ),
+  'ammonium-sulfate': reagent('ammonium-sulfate', 'ammonium sulfate', '(NH4)2SO4', {
+    'NH4+': 2,
+    'SO4--': 1,
+  }),
+  'sodium-hexafluorosilicate': reagent(
+    'sodium-hexafluorosilicate',
+    'sodium hexafluorosilicate',
+    'Na2SiF6',
+    { 'Na+': 2, 'H+': 4, 'F-': 6, H4SiO4: 1 },
+    { note: 'Hydrolysed completely to fluoride and silica.' },
+  ),
+  'monosodium-phosphate': reagent(
+    'monosodium-phosphate',
+    'monosodium phosphate',
+    'NaH2PO4',
+    { 'Na+': 1, 'H2PO4-': 1 },
+    { note: 'The orthophosphate of a blend; its polyphosphate part is no orthophosphate.' },
+  ),
+  'zinc-sulfate': reagent('zinc-sulfate', 'zinc sulfate', 'ZnSO4', { 'Zn++': 1, 'SO4--': 1 }),
+  'zinc-chloride': reagent('zinc-chloride', 'zinc chloride', 'ZnCl2', { 'Zn++': 1, 'Cl-': 2 }),
 };
 
 export const isReagent = (key: string): key is ReagentKey => Object.hasOwn(REAGENTS, key);

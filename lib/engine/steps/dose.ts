@@ -1,6 +1,12 @@
 import { COMPONENT_KEYS } from '../constants/components';
 import { refuse } from '../refusal';
-import { ALUM_HYDRATE, isReagent, REAGENTS, WATER_G_MOL } from '../reagents/catalogue';
+import {
+  ALUM_HYDRATE,
+  isReagent,
+  polyaluminumChloride,
+  REAGENTS,
+  WATER_G_MOL,
+} from '../reagents/catalogue';
 import { equilibrateWith } from '../solids/equilibrate-with';
 import { checkNumber } from '../speciation/analysis';
 import { solveClosed } from '../speciation/closed';
@@ -17,6 +23,8 @@ import {
 
 /** Largest dose the engine answers for, mg/L. */
 export const LARGEST_DOSE_MG_L = 100_000;
+/** Above it aluminium leaves no chloride to speak of: aluminium chlorohydrate reaches 0.83. */
+const HIGHEST_BASICITY = 0.9;
 /** Components that reactions run to an end may use up exactly; a rest of rounding is none. */
 const ROUNDING = 1e-14;
 
@@ -47,6 +55,18 @@ export function checkDose(dose: Dose, path = ''): Refusal | undefined {
     const fault = checkNumber(dose.hydrate, at('hydrate'), [0, 30]);
     if (fault) return fault;
   }
+  if (dose.basicity !== undefined) {
+    if (dose.reagent !== 'polyaluminum-chloride') {
+      const { name } = REAGENTS[dose.reagent];
+      return refuse(
+        'badInput',
+        `Basicity belongs to polyaluminium chloride, not to ${name}.`,
+        at('basicity'),
+      );
+    }
+    const fault = checkNumber(dose.basicity, at('basicity'), [0, HIGHEST_BASICITY]);
+    if (fault) return fault;
+  }
   return checkNumber(dose.doseMgL, at('doseMgL'), [0, LARGEST_DOSE_MG_L]);
 }
 
@@ -74,7 +94,8 @@ export function feedInto(
   const moles = dose.doseMgL / (1000 * doseMolarMass(dose));
   const totals = Float64Array.from(before);
   const fed: Record<string, number> = {};
-  for (const [key, count] of Object.entries(info.fed)) {
+  const brought = dose.basicity === undefined ? info.fed : polyaluminumChloride(dose.basicity);
+  for (const [key, count] of Object.entries(brought)) {
     fed[key] = count * moles;
     addSpecies(totals, key, count * moles);
   }

@@ -1,5 +1,5 @@
 import { COMPONENT_KEYS, type Component } from '../constants/components';
-import { formatReaction, parseReaction } from '../constants/notation';
+import { formatReaction, molarMassGMol, parseReaction } from '../constants/notation';
 import { refuse } from '../refusal';
 import { checkNumber } from '../speciation/analysis';
 import { totalsOf } from '../speciation/state';
@@ -11,9 +11,14 @@ import { settleStep } from './settle-step';
 export type Oxidisable = 'iron' | 'manganese' | 'sulfide' | 'ammonia';
 
 export interface Oxidation {
-  /** Chlorine: the free chlorine the water already holds (dose it first). Oxygen: from air, as much as is needed. */
-  readonly oxidant: 'chlorine' | 'oxygen';
-  /** In the order they are taken; iron, sulfide, manganese, ammonia when left out. Oxygen takes no ammonia. */
+  /**
+   * Chlorine: the free chlorine the water already holds (dose it first). Oxygen: from air, as much as is needed.
+   * Permanganate: what is fed here; it takes no ammonia.
+   */
+  readonly oxidant: 'chlorine' | 'oxygen' | 'permanganate';
+  /** Potassium permanganate fed with this step, mg/L; only with that oxidant. */
+  readonly permanganateMgL?: number;
+  /** In the order they are taken; iron, sulfide, manganese, ammonia when left out. Only chlorine takes ammonia. */
   readonly what?: readonly Oxidisable[];
   /** Share of each that gets oxidised if there is oxidant enough, 0…1; 1 when left out. */
   readonly extent?: number;
@@ -35,10 +40,11 @@ export type Oxidised =
 interface Route {
   readonly component: Component;
   readonly reaction: string;
-  /** Moles of the oxidised component, of HOCl and of O2 in one turn of the reaction. */
+  /** Moles of the oxidised component, of HOCl, of O2 and of MnO4- in one turn of the reaction. */
   readonly takes: number;
   readonly chlorine: number;
   readonly oxygen: number;
+  readonly permanganate: number;
 }
 
 const route = (
@@ -47,7 +53,8 @@ const route = (
   takes: number,
   chlorine: number,
   oxygen: number,
-): Route => ({ component, reaction, takes, chlorine, oxygen });
+  permanganate = 0,
+): Route => ({ component, reaction, takes, chlorine, oxygen, permanganate });
 
 /** Overall reactions of practice; iron leaves as ferrihydrite, manganese as its dioxide. */
 const ROUTES = {
@@ -61,10 +68,23 @@ const ROUTES = {
     sulfide: route('S', 'H2S + 2O2 = SO4-- + 2H+', 1, 0, 2),
     manganese: route('Mn', '2Mn++ + O2 + 2H2O = 2MnO2 + 4H+', 2, 0, 1),
   },
+  permanganate: {
+    iron: route('Fe2', '3Fe++ + MnO4- + 4H+ = 3Fe+++ + MnO2 + 2H2O', 3, 0, 0, 1),
+    sulfide: route('S', '3H2S + 8MnO4- + 2H+ = 3SO4-- + 8MnO2 + 4H2O', 3, 0, 0, 8),
+    manganese: route('Mn', '3Mn++ + 2MnO4- + 2H2O = 5MnO2 + 4H+', 3, 0, 0, 2),
+  },
 } as const;
 
 const MONOCHLORAMINE = 'NH4+ + HOCl = NH2Cl + H2O + H+';
 const BREAKPOINT = '2NH2Cl + HOCl = N2 + 3Cl- + 3H+ + H2O';
+const OXIDANT_WORDS = {
+  chlorine: 'Chlorine',
+  oxygen: 'Oxygen',
+  permanganate: 'Permanganate',
+} as const;
+const PERMANGANATE_G_MOL = molarMassGMol('KMnO4');
+const MOST_PERMANGANATE_MG_L = 1000;
+
 /** None of these rests at an equilibrium within the model: no constant is given for them. */
 const SOURCE = 'overall stoichiometry, common practice';
 
@@ -73,13 +93,20 @@ const SOURCE = 'overall stoichiometry, common practice';
  * nitrogen (3 HOCl for 2 N in all, 7.6 mg Cl2 per mg N: the break-point); chlorine beyond that stays free.
  */
 export function oxidise(water: Water, how: Oxidation): Oxidised {
-  if (how.oxidant !== 'chlorine' && how.oxidant !== 'oxygen') {
+  if (!Object.hasOwn(ROUTES, how.oxidant)) {
     return refuse('badInput', `No oxidant is called ${String(how.oxidant)}.`, 'oxidant');
   }
   const extent = how.extent ?? 1;
-  const fault = checkNumber(extent, 'extent', [0, 1]);
+  const permanganateMgL = how.permanganateMgL ?? 0;
+  const fault =
+    checkNumber(extent, 'extent', [0, 1]) ??
+    checkNumber(permanganateMgL, 'permanganateMgL', [0, MOST_PERMANGANATE_MG_L]);
   if (fault) return fault;
   const totals = totalsOf(water);
+  let permanganateLeft =
+    how.oxidant === 'permanganate' ? permanganateMgL / (1000 * PERMANGANATE_G_MOL) : 0;
+  // Only what reacts enters the account: its potassium stays in the water, its manganese leaves as the dioxide.
+  const permanganateFed = permanganateLeft;
   const reactions: CompleteReaction[] = [];
   const remarks: string[] = [];
   let oxygenUsedMolKg = 0;
@@ -91,17 +118,29 @@ export function oxidise(water: Water, how: Oxidation): Oxidised {
     const path = ROUTES[how.oxidant][what];
     if (path === undefined) return refuse('badInput', `${String(what)} is not oxidised.`, 'what');
     const wanted = (extent * totalOf(totals, path.component)) / path.takes;
-    const possible = path.chlorine > 0 ? totalOf(totals, 'HOCl') / path.chlorine : Infinity;
+    const possible = Math.min(
+      path.chlorine > 0 ? totalOf(totals, 'HOCl') / path.chlorine : Infinity,
+      path.permanganate > 0 ? permanganateLeft / path.permanganate : Infinity,
+    );
     const turns = Math.min(wanted, possible);
-    if (turns < wanted) remarks.push(`Chlorine ran out before all ${what} was oxidised.`);
+    if (turns < wanted)
+      remarks.push(`${OXIDANT_WORDS[how.oxidant]} ran out before all ${what} was oxidised.`);
     if (!(turns > 0)) continue;
     run(path.reaction, turns, totals, reactions);
     oxygenUsedMolKg += turns * path.oxygen;
+    permanganateLeft -= turns * path.permanganate;
     if (what === 'iron') {
       const hydroxide = precipitationOf('ferrihydrite', turns * path.takes, water.temperatureC);
       takeOut(hydroxide, totals);
       reactions.push(hydroxide);
     }
+  }
+  addSpecies(totals, 'K+', permanganateFed - permanganateLeft);
+  if (permanganateLeft > 1e-12) {
+    const leftMgL = permanganateLeft * 1000 * PERMANGANATE_G_MOL;
+    remarks.push(
+      `${leftMgL.toPrecision(2)} mg/L of permanganate found nothing to oxidise: the water would turn pink.`,
+    );
   }
   const solids = solidsOf(reactions);
   clearRounding(totals);
