@@ -7,7 +7,8 @@ describe('the notes on the indices', () => {
     const computed = Object.keys(indicesOf(waterOf(riverWater))).sort();
     expect(Object.keys(INDEX_NOTES).sort()).toEqual(computed);
     for (const note of Object.values(INDEX_NOTES)) {
-      for (const words of Object.values<string>({ ...note })) expect(words.length).toBeGreaterThan(5);
+      for (const words of Object.values<string>({ ...note }))
+        expect(words.length).toBeGreaterThan(5);
     }
   });
 

@@ -1,19 +1,19 @@
 /** Prints how far the engine lies from published values and from an independent high-precision solve: mean and worst. */
 import fc from 'fast-check';
-import { CONSTANTS_HASH, ENGINE_VERSION, solveWater, type WaterAnalysis } from '../lib/engine';
-import { debyeHuckelAt, waterDensityKgM3 } from '../lib/engine/activity/water-properties';
-import { CACO3_MG_PER_EQ } from '../lib/engine/constants/carbonate-equivalents';
-import { ATOMIC_WEIGHTS as M } from '../lib/engine/constants/elements';
-import { CONSTANT_ROWS } from '../lib/engine/constants/table';
-import { logKAt } from '../lib/engine/constants/temperature';
-import { disinfect } from '../lib/engine';
-import { solvePrecisely } from '../tests/engine/high-precision';
-import activity from '../tests/engine/published/activity-density.json';
-import carbonate from '../tests/engine/published/carbonate-constants.json';
-import ctTables from '../tests/engine/published/ct-tables.json';
-import standards from '../tests/engine/published/ph-standards.json';
-import saturation from '../tests/engine/published/saturation-tables.json';
-import { anyWater } from '../tests/engine/waters';
+import { CONSTANTS_HASH, ENGINE_VERSION, solveWater, type WaterAnalysis } from '../../lib/engine';
+import { debyeHuckelAt, waterDensityKgM3 } from '../../lib/engine/activity/water-properties';
+import { CACO3_MG_PER_EQ } from '../../lib/engine/constants/carbonate-equivalents';
+import { ATOMIC_WEIGHTS as M } from '../../lib/engine/constants/elements';
+import { CONSTANT_ROWS } from '../../lib/engine/constants/table';
+import { logKAt } from '../../lib/engine/constants/temperature';
+import { disinfect } from '../../lib/engine';
+import { solvePrecisely } from '../../tests/engine/high-precision';
+import activity from '../../tests/engine/published/activity-density.json';
+import carbonate from '../../tests/engine/published/carbonate-constants.json';
+import ctTables from '../../tests/engine/published/ct-tables.json';
+import standards from '../../tests/engine/published/ph-standards.json';
+import saturation from '../../tests/engine/published/saturation-tables.json';
+import { anyWater } from '../../tests/engine/waters';
 
 interface Quantity {
   readonly name: string;
