@@ -15,6 +15,7 @@ export function PlantLineStep({
   plantSlug,
   timeZone,
   now,
+  maySample,
 }: {
   step: LineStep;
   isFirst: boolean;
@@ -23,6 +24,7 @@ export function PlantLineStep({
   plantSlug: string;
   timeZone: string;
   now: Date;
+  maySample: boolean;
 }) {
   return (
     <li className="relative grid grid-cols-[3.5rem_1fr] gap-x-4 pb-6 last:pb-0 xl:row-span-4 xl:grid-cols-1 xl:grid-rows-subgrid xl:gap-x-0 xl:pb-0">
@@ -63,6 +65,7 @@ export function PlantLineStep({
             plantSlug={plantSlug}
             timeZone={timeZone}
             now={now}
+            maySample={maySample}
           />
         </div>
       )}

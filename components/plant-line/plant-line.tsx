@@ -11,12 +11,14 @@ export function PlantLine({
   plantSlug,
   timeZone,
   now,
+  maySample,
 }: {
   steps: readonly LineStep[];
   organisationSlug: string;
   plantSlug: string;
   timeZone: string;
   now: Date;
+  maySample: boolean;
 }) {
   const columns = steps
     .map(({ station }) => (station === null ? 'minmax(7.25rem, 0.8fr)' : 'minmax(9.5rem, 1.3fr)'))
@@ -37,6 +39,7 @@ export function PlantLine({
           plantSlug={plantSlug}
           timeZone={timeZone}
           now={now}
+          maySample={maySample}
         />
       ))}
     </ol>

@@ -16,6 +16,8 @@ function shownReadings(readings: readonly Reading[]): readonly Reading[] {
   return readings.filter((reading) => isMissed(reading) || kept.has(reading));
 }
 
+const DUE_WORDS = { overdue: 'Sample overdue', soon: 'Sample due soon' } as const;
+
 const VERDICT_WORDS = {
   below: { sign: '▼', word: 'low' },
   above: { sign: '▲', word: 'high' },
@@ -28,12 +30,14 @@ export function StationReadings({
   plantSlug,
   timeZone,
   now,
+  maySample,
 }: {
   station: Station;
   organisationSlug: string;
   plantSlug: string;
   timeZone: string;
   now: Date;
+  maySample: boolean;
 }) {
   const { lastSample, due } = station;
   return (
@@ -59,12 +63,16 @@ export function StationReadings({
       </dl>
       {due !== null && due.state !== 'done' ? (
         <p className="mt-1">
-          <Link
-            href={paths.newSample(organisationSlug, plantSlug, station.slug)}
-            className="inline-flex min-h-touch items-center text-sm font-semibold"
-          >
-            {due.state === 'overdue' ? 'Sample overdue' : 'Sample due soon'}: enter one
-          </Link>
+          {maySample ? (
+            <Link
+              href={paths.newSample(organisationSlug, plantSlug, station.slug)}
+              className="inline-flex min-h-touch items-center text-sm font-semibold"
+            >
+              {DUE_WORDS[due.state]}: enter one
+            </Link>
+          ) : (
+            <strong className="text-sm">{DUE_WORDS[due.state]}</strong>
+          )}
         </p>
       ) : null}
     </section>

@@ -27,6 +27,8 @@ export async function pageActor(organisationSlug: string, permission: Permission
   } catch (error) {
     if (error instanceof AppError && error.code === 'signedOut') redirect(paths.signIn);
     if (error instanceof AppError && error.code === 'notFound') nextNotFound();
+    // A page that a role may not open is not there for it; its links are not shown either.
+    if (error instanceof AppError && error.code === 'forbidden') nextNotFound();
     throw error;
   }
 }

@@ -15,11 +15,13 @@ export function DueList({
   organisationSlug,
   plantSlug,
   timeZone,
+  maySample,
 }: {
   today: Today;
   organisationSlug: string;
   plantSlug: string;
   timeZone: string;
+  maySample: boolean;
 }) {
   const stations = today.steps.flatMap(({ station }) => (station === null ? [] : [station]));
   return (
@@ -31,7 +33,11 @@ export function DueList({
         {stations.map(({ slug, name, due }) =>
           due === null ? null : (
             <li key={slug} className="flex flex-wrap items-baseline justify-between gap-x-3 py-2">
-              <Link href={paths.newSample(organisationSlug, plantSlug, slug)}>{name}</Link>
+              {maySample ? (
+                <Link href={paths.newSample(organisationSlug, plantSlug, slug)}>{name}</Link>
+              ) : (
+                <span>{name}</span>
+              )}
               <span className="text-sm">
                 <strong className={STATE_WORDS[due.state].colour}>
                   {STATE_WORDS[due.state].word}

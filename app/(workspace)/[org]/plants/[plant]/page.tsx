@@ -24,12 +24,13 @@ export default async function TodayPage({
   const { actor, plant } = await pagePlant(params, 'plant.read');
   const today = await readToday(actor, plant, systemClock);
   const slugs = { organisationSlug: actor.organisation.slug, plantSlug: plant.slug };
+  const maySample = roleMay(actor.role, 'sample.write');
   return (
     <>
       <PageHeading
         title={plant.name}
         actions={
-          roleMay(actor.role, 'sample.write') ? (
+          maySample ? (
             <Link
               href={paths.newSample(slugs.organisationSlug, plant.slug)}
               className={buttonClass('main')}
@@ -43,10 +44,16 @@ export default async function TodayPage({
         {formatNumber(plant.designFlowMlPerD, 0)} ML/d design flow.
       </PageHeading>
       <InBrief today={today} />
-      <PlantLine steps={today.steps} {...slugs} timeZone={plant.timeZone} now={today.now} />
+      <PlantLine
+        steps={today.steps}
+        {...slugs}
+        timeZone={plant.timeZone}
+        now={today.now}
+        maySample={maySample}
+      />
       <div className="mt-8 grid gap-x-10 gap-y-8 border-t border-rule-strong pt-6 lg:grid-cols-3">
         <OutOfTarget today={today} {...slugs} />
-        <DueList today={today} {...slugs} timeZone={plant.timeZone} />
+        <DueList today={today} {...slugs} timeZone={plant.timeZone} maySample={maySample} />
         <ShiftNotes notes={today.notes} timeZone={plant.timeZone} />
       </div>
     </>

@@ -1,0 +1,35 @@
+import type { Browser } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest';
+import { launchBrowser, openPage } from '../support/browser';
+import { signIn, signInOf } from '../support/sign-in';
+
+const baseUrl = inject('baseUrl');
+const signIns = inject('signIns');
+let browser: Browser;
+
+beforeAll(async () => {
+  browser = await launchBrowser();
+});
+afterAll(() => browser.close());
+
+const PLANT = '/calverdine/plants/quarrel-hill';
+
+describe('a role sees what it may do, and no more', () => {
+  it.each([
+    { role: 'operator', samples: true, audit: false },
+    { role: 'consultant', samples: false, audit: false },
+    { role: 'manager', samples: true, audit: true },
+    { role: 'owner', samples: true, audit: true },
+  ])('$role: enters samples $samples, reads the audit $audit', async ({ role, samples, audit }) => {
+    const { page, close } = await openPage(browser, baseUrl);
+    await signIn(page, signInOf(signIns, role));
+    await page.goto(PLANT);
+    expect(await page.getByRole('link', { name: 'Enter a sample' }).count()).toBe(samples ? 1 : 0);
+    expect(await page.getByRole('link', { name: 'Audit' }).count()).toBe(audit ? 1 : 0);
+    const status = async (path: string) => (await page.goto(path))?.status();
+    expect(await status(`${PLANT}/samples/new?point=raw`)).toBe(samples ? 200 : 404);
+    expect(await status('/calverdine/audit')).toBe(audit ? 200 : 404);
+    expect(await status('/somebody-else')).toBe(404);
+    await close();
+  });
+});
