@@ -20,5 +20,5 @@ export function proxy(request: NextRequest): NextResponse {
 
 export const config = {
   // Static files carry no secrets and need no nonce.
-  matcher: '/((?!_next/static|_next/image|icon.svg|robots.txt).*)',
+  matcher: '/((?!_next/static|_next/image|icon.svg|favicon.ico|robots.txt).*)',
 };

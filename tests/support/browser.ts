@@ -38,6 +38,10 @@ export async function openPage(
       complaints.push(`console ${message.type()}: ${message.text()}`);
     }
   });
+  // The console says that something was not found, not what.
+  page.on('response', (response) => {
+    if (response.status() >= 400) complaints.push(`${response.status()} ${response.url()}`);
+  });
   page.on('pageerror', (error) => complaints.push(`page error: ${error.message}`));
   page.on('request', (request) => {
     const url = new URL(request.url());
