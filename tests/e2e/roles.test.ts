@@ -24,6 +24,8 @@ describe('a role sees what it may do, and no more', () => {
     const { page, close } = await openPage(browser, baseUrl);
     await signIn(page, signInOf(signIns, role));
     await page.goto(PLANT);
+    await page.getByRole('heading', { level: 1, name: 'Quarrel Hill' }).waitFor();
+    await page.getByRole('list', { name: /line of water/ }).waitFor();
     expect(await page.getByRole('link', { name: 'Enter a sample' }).count()).toBe(samples ? 1 : 0);
     expect(await page.getByRole('link', { name: 'Audit' }).count()).toBe(audit ? 1 : 0);
     // A page that streams has sent its status before it knows; what it shows is what counts.
