@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import {
   chmodSync,
   chownSync,
@@ -33,13 +34,26 @@ const runAsServerUser = (program, args, options = {}) =>
 /** @typedef {{ adminUrl: string, port: number, startedHere: boolean, stop: () => Promise<void> }} Cluster */
 
 /**
+ * The administrator's password, kept beside the data it opens: a clone made anew at the same place finds both.
+ * @param {string} folder
+ */
+export function administratorPassword(folder) {
+  const path = join(folder, 'administrator-password');
+  if (!existsSync(path)) {
+    writeFileSync(path, randomBytes(24).toString('hex'), { mode: 0o600 });
+  }
+  return readFileSync(path, 'utf8');
+}
+
+/**
  * A PostgreSQL server of the project's own, on loopback, in `folder`: made when missing, started when not running.
- * @param {{ binaries: string, folder: string, outside: string, password: string, throwAway?: boolean }} options
+ * @param {{ binaries: string, folder: string, outside: string, throwAway?: boolean }} options
  *   `outside` is used, and `folder` becomes a link to it, where the server's user may not enter `folder`
  * @returns {Promise<Cluster>}
  */
-export async function openCluster({ binaries, folder, outside, password, throwAway = false }) {
+export async function openCluster({ binaries, folder, outside, throwAway = false }) {
   const data = await placeFor(folder, outside);
+  const password = administratorPassword(dirname(data));
   await makeCluster(binaries, data, password);
   const running = runningPort(data);
   if (running !== null) return opened(binaries, data, running, password, false);

@@ -28,7 +28,6 @@ export async function openProductDatabase(secrets) {
     binaries,
     folder: join(STATE, 'postgres'),
     outside: join(OUTSIDE_STATE, 'postgres'),
-    password: secrets.adminPassword,
   });
   try {
     await ensureRoles(cluster.adminUrl, secrets);

@@ -4,7 +4,7 @@ import { join } from 'node:path';
 import { STATE } from './places.mjs';
 
 /**
- * @typedef {{ sessionSecret: string, ownerPassword: string, appPassword: string, adminPassword: string }} Secrets
+ * @typedef {{ sessionSecret: string, ownerPassword: string, appPassword: string }} Secrets
  */
 
 /** Made once, kept readable for this user only. */
@@ -17,7 +17,6 @@ export function ensureSecrets() {
     sessionSecret: kept.sessionSecret ?? randomBytes(32).toString('hex'),
     ownerPassword: kept.ownerPassword ?? randomBytes(24).toString('hex'),
     appPassword: kept.appPassword ?? randomBytes(24).toString('hex'),
-    adminPassword: kept.adminPassword ?? randomBytes(24).toString('hex'),
   };
   mkdirSync(STATE, { recursive: true });
   writeFileSync(path, `${JSON.stringify(secrets, null, 2)}\n`, { mode: 0o600 });

@@ -51,7 +51,6 @@ async function adminServer() {
       binaries: await ensurePostgresBinaries(),
       folder,
       outside,
-      password: randomBytes(16).toString('hex'),
       throwAway: true,
     });
     return {

@@ -1,8 +1,9 @@
-import { mkdirSync, mkdtempSync, writeFileSync } from 'node:fs';
+import { mkdirSync, mkdtempSync, statSync, writeFileSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { administratorPassword } from '@/docker-free-scripts/setup/cluster.mjs';
 import { checkNodeVersion } from '@/docker-free-scripts/setup/node-modules.mjs';
 import { freePort, isPortFree } from '@/docker-free-scripts/setup/ports.mjs';
 import { findPostgresBinaries } from '@/docker-free-scripts/setup/postgres-binaries.mjs';
@@ -41,6 +42,15 @@ describe('the set-up', () => {
     await new Promise((resolve) => holder.once('listening', resolve));
     expect(await isPortFree(port)).toBe(false);
     await new Promise((resolve) => holder.close(resolve));
+  });
+
+  it('keeps the database’s password beside its data, for this user only: a new clone finds both', () => {
+    const folder = temporary();
+    const made = administratorPassword(folder);
+    expect(made).toMatch(/^[0-9a-f]{48}$/);
+    expect(administratorPassword(folder)).toBe(made);
+    expect(administratorPassword(temporary())).not.toBe(made);
+    expect(statSync(join(folder, 'administrator-password')).mode & 0o777).toBe(0o600);
   });
 
   it('takes the newest PostgreSQL server that is new enough and whole', () => {
