@@ -16,14 +16,19 @@ type Joined = {
   qualifier?: ResultRow['qualifier'];
 };
 
-const between = <Row extends ResultRow | SampleIndexRow>(
-  db: Database,
-  table: 'results' | 'sample_indices',
+/** Whose series, of what, at which point, from a moment up to but without another. */
+type SeriesArguments = [
   organisationId: string,
   pointId: string,
   quantity: string,
   from: Date,
   to: Date,
+];
+
+const between = <Row extends ResultRow | SampleIndexRow>(
+  db: Database,
+  table: 'results' | 'sample_indices',
+  ...[organisationId, pointId, quantity, from, to]: SeriesArguments
 ) =>
   db<Row>(`${table} as r`)
     .join('samples as s', 's.id', 'r.sample_id')
@@ -44,41 +49,26 @@ const toPoint = (row: Joined): SeriesPointRow => ({
 /** Every measured value of one quantity at one point, oldest first. */
 export async function listResultSeries(
   db: Database,
-  organisationId: string,
-  pointId: string,
-  quantity: string,
-  from: Date,
-  to: Date,
+  ...asked: SeriesArguments
 ): Promise<SeriesPointRow[]> {
-  const rows = await between<ResultRow>(
-    db,
-    'results',
-    organisationId,
-    pointId,
-    quantity,
-    from,
-    to,
-  ).select<Joined[]>('r.sample_id', 's.taken_at', 'r.value', 'r.qualifier');
+  const rows = await between<ResultRow>(db, 'results', ...asked).select<Joined[]>(
+    'r.sample_id',
+    's.taken_at',
+    'r.value',
+    'r.qualifier',
+  );
   return rows.map(toPoint);
 }
 
 /** Every value of one index at one point, oldest first. */
 export async function listIndexSeries(
   db: Database,
-  organisationId: string,
-  pointId: string,
-  quantity: string,
-  from: Date,
-  to: Date,
+  ...asked: SeriesArguments
 ): Promise<SeriesPointRow[]> {
-  const rows = await between<SampleIndexRow>(
-    db,
-    'sample_indices',
-    organisationId,
-    pointId,
-    quantity,
-    from,
-    to,
-  ).select<Joined[]>('r.sample_id', 's.taken_at', 'r.value');
+  const rows = await between<SampleIndexRow>(db, 'sample_indices', ...asked).select<Joined[]>(
+    'r.sample_id',
+    's.taken_at',
+    'r.value',
+  );
   return rows.map(toPoint);
 }

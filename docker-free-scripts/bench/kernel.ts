@@ -1,4 +1,3 @@
-import type { WaterAnalysis } from '../../lib/engine';
 import { solveWater } from '../../lib/engine';
 import { factorise, substitute } from '../../lib/engine/numeric/lu';
 import { assemble } from '../../lib/engine/speciation/assemble';
@@ -6,27 +5,8 @@ import { evaluate } from '../../lib/engine/speciation/evaluate';
 import { solveByNewton } from '../../lib/engine/speciation/newton';
 import { CLOSED, prepare, solveConditions } from '../../lib/engine/speciation/solve';
 import { totalsOf } from '../../lib/engine/speciation/state';
+import { riverWater as twelveAnalytes } from '../../tests/engine/support';
 import { bytesPerCall, secondsPerCall, type Line } from './measure';
-
-const twelveAnalytes: WaterAnalysis = {
-  temperatureC: 12,
-  pH: 7.7,
-  alkalinityMgLCaCO3: 92,
-  analytesMgL: {
-    calcium: 38,
-    magnesium: 7.2,
-    sodium: 14,
-    potassium: 2.4,
-    chloride: 21,
-    sulfate: 29,
-    nitrate: 6,
-    fluoride: 0.2,
-    silica: 7,
-    phosphate: 0.05,
-    ammonia: 0.1,
-    boron: 0.03,
-  },
-};
 
 /** One Newton iteration against its floor: as many exponentials as species and one LU of the components. */
 export function benchKernel(): Line[] {

@@ -33,7 +33,10 @@ export function LiveFindings({ results }: { results: readonly WrittenResult[] })
           {solution.assumptions.length === 0 ? null : (
             <details className="mt-3 text-sm">
               <summary className="min-h-6 text-ink-soft">
-                {solution.assumptions.length} assumptions behind these figures
+                {solution.assumptions.length === 1
+                  ? 'One assumption'
+                  : `${solution.assumptions.length} assumptions`}{' '}
+                behind these figures
               </summary>
               <ul className="mt-1 list-disc pl-5">
                 {solution.assumptions.map((sentence) => (
