@@ -23,6 +23,29 @@ export function secondsPerCall(call: () => void, rounds = 7, roundSeconds = 0.08
   return least;
 }
 
+/**
+ * Seconds a call of each takes, the calls taking turns so that a busy moment of the machine strikes all alike: the least
+ * of many short rounds.
+ */
+export function secondsEach<Name extends string>(
+  calls: Readonly<Record<Name, () => void>>,
+  rounds = 60,
+  roundSeconds = 0.01,
+): Record<Name, number> {
+  const names = Object.keys(calls) as Name[];
+  const least = Object.fromEntries(names.map((name) => [name, Infinity])) as Record<Name, number>;
+  for (let round = 0; round < rounds; round++) {
+    for (const name of names) {
+      const expected = least[name] === Infinity ? 1e-5 : least[name];
+      const count = Math.max(1, Math.round(roundSeconds / expected));
+      const from = performance.now();
+      for (let i = 0; i < count; i++) calls[name]();
+      least[name] = Math.min(least[name], (performance.now() - from) / 1000 / count);
+    }
+  }
+  return least;
+}
+
 /** Bytes the heap grows by per call, over many calls. */
 export function bytesPerCall(call: () => void, calls: number): number {
   for (let i = 0; i < 1000; i++) call();

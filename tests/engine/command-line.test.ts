@@ -11,13 +11,13 @@ interface Ran {
 }
 
 /** Runs the command line on lines given as objects, or as text for what is not JSON. */
-function run(verb: string, lines: readonly unknown[]): Ran {
+function run(verb: string, lines: readonly unknown[], ...options: readonly string[]): Ran {
   const input = lines
     .map((line) => (typeof line === 'string' ? line : JSON.stringify(line)))
     .join('\n');
   const done = spawnSync(
     process.execPath,
-    ['--import', 'tsx', 'docker-free-scripts/engine.ts', verb],
+    ['--import', 'tsx', 'docker-free-scripts/engine.ts', verb, ...options],
     {
       cwd: root,
       input: input === '' ? '' : `${input}\n`,
@@ -182,6 +182,21 @@ describe('the engine on the command line', () => {
     ]);
     expect(lines[0]).toMatchObject({ id: 1, logInactivation: 1.5, ctRequired: { '3': 112 } });
     expect(lines[1]).toMatchObject({ error: { path: 'agent' } });
+  });
+
+  it('spreads a season of plans over threads: the same answers in the same order, and its progress told', () => {
+    const days = Array.from({ length: 40 }, (_, day) => ({
+      id: day,
+      water: { ...water, temperature: 4 + day / 4 },
+      reagents: [{ reagent: 'sodium-hydroxide', max: 40, costPerKg: 0.8 }],
+      targets: [{ quantity: 'pH', min: 8.2, max: day === 17 ? 'high' : 8.6 }],
+    }));
+    const alone = run('plan', days);
+    const spread = run('plan', days, '--threads');
+    expect(spread.lines).toEqual(alone.lines);
+    expect(spread.status).toBe(1);
+    expect(spread.lines[17]).toMatchObject({ id: 17, error: { path: 'targets.0.max' } });
+    expect(spread.stderr).toContain('answered 40 of 40 lines read');
   });
 
   it('answers nothing to nothing, and explains itself when misused', () => {

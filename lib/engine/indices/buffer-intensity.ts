@@ -1,6 +1,8 @@
 import { HYDROGEN } from '../constants/components';
 import { factorise, substitute } from '../numeric/lu';
 import { solveClosed } from '../speciation/closed';
+import { fillJacobian } from '../speciation/jacobian';
+import { CLOSED } from '../speciation/solve';
 import { startOf, totalsOf } from '../speciation/state';
 import type { Water } from '../types';
 
@@ -19,6 +21,7 @@ export function bufferIntensityOf(water: Water): number {
   const place = system.components.length - 1;
   // Hydrogen stands last of the components; its row compares ln of acids and bases; at the solution both equal this sum.
   const side = (scalars[2] ?? 0) + Math.max(-(totals[HYDROGEN] ?? 0), 0);
+  fillJacobian(workspace, CLOSED);
   right.fill(0);
   right[place] = 1 / side;
   if (!factorise(matrix, size, stride, pivots)) return NaN;

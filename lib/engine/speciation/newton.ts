@@ -1,6 +1,8 @@
 import { factorise, substitute } from '../numeric/lu';
-import { assemble, type Problem } from './assemble';
 import { evaluate } from './evaluate';
+import { fillGaps } from './gaps';
+import { fillJacobian } from './jacobian';
+import type { Problem } from './problem';
 import type { Workspace } from './workspace';
 
 export type Ending =
@@ -14,7 +16,10 @@ export type Ending =
 
 /** Largest relative residual that counts as converged. */
 export const TOLERANCE = 1e-10;
-/** Newton goes on below the tolerance until it gets here or a step no longer helps: the last digits cost one step. */
+/**
+ * Below the tolerance the last factors are used again until the residual gets here or a step no longer helps: so near
+ * the answer they are as good as new ones, and the last digits cost one evaluation.
+ */
 const GOAL = 2e-14;
 /** Largest step in ln a(H+), and in ln of any other activity. */
 const HYDROGEN_STEP = 4;
@@ -36,9 +41,10 @@ export function solveByNewton(workspace: Workspace, problem: Problem, limit = 40
   let previous = Infinity;
   let bestGap = Infinity;
   let halvings = 0;
+  let factored = false;
   for (let iterations = 0; ; iterations++) {
     evaluate(workspace);
-    const residual = assemble(workspace, problem);
+    const residual = fillGaps(workspace, problem);
     if (!(residual < Infinity)) return { converged: false, why: 'notFinite', iterations, residual };
     const stalled = residual <= TOLERANCE && residual > 0.01 * previous;
     if (residual <= GOAL || stalled) return { converged: true, iterations, residual };
@@ -55,8 +61,10 @@ export function solveByNewton(workspace: Workspace, problem: Problem, limit = 40
     bestGap = gap;
     if (gap < FAR) workspace.ionicBound = Infinity;
     previous = residual;
-    if (!factorise(matrix, size, stride, pivots)) {
-      return { converged: false, why: 'singular', iterations, residual };
+    if (!factored || residual > TOLERANCE) {
+      fillJacobian(workspace, problem);
+      factored = factorise(matrix, size, stride, pivots);
+      if (!factored) return { converged: false, why: 'singular', iterations, residual };
     }
     substitute(matrix, size, stride, pivots, right);
     step(workspace, size);
@@ -81,16 +89,20 @@ function stepBack(workspace: Workspace, size: number): void {
 /** Adds the step in `right` to the unknowns, shortened where it would leave the region the model is trusted in. */
 function step(workspace: Workspace, size: number): void {
   const { unknowns, right, held } = workspace;
-  const m = workspace.system.components.length;
-  let share = Math.min(1, HYDROGEN_STEP / Math.abs(right[m - 1] as number));
-  for (let place = 0; place < m - 1; place++) {
-    share = Math.min(share, ACTIVITY_STEP / Math.abs(right[place] as number));
-  }
-  for (let k = 0; k < size; k++) {
+  const m = workspace.sums.length;
+  let most = 0;
+  for (let place = 0; place < m; place++) most = Math.max(most, Math.abs(right[place] as number));
+  const share = most > HYDROGEN_STEP ? shareOfStep(right, m) : 1;
+  // Components stand backwards in the matrix (see jacobian.ts).
+  for (let k = 0; k < m; k++) {
     const from = unknowns[k] as number;
     held[k] = from;
-    // Components stand backwards in the matrix (see assemble.ts).
-    unknowns[k] = from + share * (right[k < m ? m - 1 - k : k] as number);
+    unknowns[k] = from + share * (right[m - 1 - k] as number);
+  }
+  for (let k = m; k < size; k++) {
+    const from = unknowns[k] as number;
+    held[k] = from;
+    unknowns[k] = from + share * (right[k] as number);
   }
   const ionic = held[m] as number;
   unknowns[m] = Math.min(
@@ -98,4 +110,12 @@ function step(workspace: Workspace, size: number): void {
     ionic * IONIC_FACTOR,
     workspace.ionicBound,
   );
+}
+
+function shareOfStep(right: Float64Array, m: number): number {
+  let share = Math.min(1, HYDROGEN_STEP / Math.abs(right[m - 1] as number));
+  for (let place = 0; place < m - 1; place++) {
+    share = Math.min(share, ACTIVITY_STEP / Math.abs(right[place] as number));
+  }
+  return share;
 }

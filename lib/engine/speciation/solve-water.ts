@@ -2,7 +2,7 @@ import { CACO3_MG_PER_EQ, CARBON_MG_PER_MOL } from '../constants/carbonate-equiv
 import { CARBON, HYDROGEN } from '../constants/components';
 import { refuse } from '../refusal';
 import type { Refusal, Solved, WaterAnalysis } from '../types';
-import type { Problem } from './assemble';
+import type { Problem } from './problem';
 import { checkAnalysis, HIGHEST_CO2_ATM, type CheckedAnalysis } from './analysis';
 import { solveClosed } from './closed';
 import { describe } from './describe';

@@ -1,5 +1,5 @@
 import { COMPONENT_KEYS, CARBON, HYDROGEN, LEAST_TOTAL_MOL_KG } from '../constants/components';
-import type { Problem } from './assemble';
+import type { Problem } from './problem';
 import { solveByNewton, type Ending } from './newton';
 import { guess, resume, settle, type Start } from './start';
 import { systemOf } from './system';

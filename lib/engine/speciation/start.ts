@@ -1,6 +1,6 @@
 import { CARBON, HYDROGEN } from '../constants/components';
-import type { Problem } from './assemble';
 import { evaluate } from './evaluate';
+import type { Problem } from './problem';
 import type { Workspace } from './workspace';
 
 /** What a solve may start from: ln activity of every basis species by component, and ionic strength (mol/kg). */
@@ -166,7 +166,7 @@ export function resume(workspace: Workspace, totals: Float64Array, start: Start)
  * diagonal with ionic strength as guessed: descent on a convex function, so that Newton never sees absurd amounts.
  */
 export function settle(workspace: Workspace, carbonHeld: boolean): void {
-  const { system, unknowns, sums, totals, products } = workspace;
+  const { system, unknowns, sums, totals } = workspace;
   const m = system.components.length;
   for (let sweep = 0; sweep < SWEEPS; sweep++) {
     evaluate(workspace);
@@ -182,7 +182,18 @@ export function settle(workspace: Workspace, carbonHeld: boolean): void {
       over = gap;
     }
     if (column === 0) return;
-    const diagonal = (products[column * m + column] as number) / (sums[column] as number);
+    const diagonal = squareSum(workspace, column) / (sums[column] as number);
     unknowns[column] = (unknowns[column] as number) - over / diagonal;
   }
+}
+
+/** Σ count² · molality: the derivative of a component's sum by its own ln activity. */
+function squareSum({ system, molality }: Workspace, column: number): number {
+  const { from, terms } = system;
+  let sum = 0;
+  const to = 2 * (from[column + 1] as number);
+  for (let p = 2 * (from[column] as number); p < to; p += 2) {
+    sum += (terms[p + 1] as number) ** 2 * (molality[terms[p] as number] as number);
+  }
+  return sum;
 }

@@ -21,12 +21,17 @@ export interface System {
   readonly carbon: number;
   readonly species: readonly Entry[];
   readonly charges: Float64Array;
-  /** Composition by component: run from[j] … from[j + 1] of `count` moles in species `owner`. */
+  /** ½ z² of each species. */
+  readonly halfSquare: Float64Array;
+  /** Composition by component: run from[j] … from[j + 1] of pairs in `terms`, a species and its moles of j. */
   readonly from: Int32Array;
-  readonly owner: Int32Array;
-  readonly count: Float64Array;
-  /** Σ count · count · molality over the upper triangle (row-major). */
+  readonly terms: Int32Array;
+  /** Σ count · count · molality above the diagonal (row-major). */
   readonly pairs: Gather;
+  /** Row and column of each entry of `pairs`. */
+  readonly pairPlaces: { readonly rows: Int32Array; readonly columns: Int32Array };
+  /** What the diagonal holds over the plain sum: Σ (count² − count) · molality. */
+  readonly squares: Gather;
   /** The same for the species that hold H+ over the basis, in the hydrogen row alone. */
   readonly acidPairs: Gather;
   /** Moles of H+ in each species over the basis. */
@@ -92,6 +97,7 @@ function compile(mask: number): System {
     carbon: columnOf.get(1) ?? -1,
     species,
     charges: Float64Array.from(species, (entry) => entry.charge),
+    halfSquare: Float64Array.from(species, (entry) => 0.5 * entry.charge * entry.charge),
     ...byComponent(components.length, owners, columns, counts),
     ...pairsOf(components.length, owners, columns, counts),
     hydrogen: Float64Array.from(species, (entry) => entry.composition[0] ?? 0),
@@ -130,8 +136,7 @@ function byComponent(
   for (let j = 0; j < m; j++) from[j + 1] = (from[j + 1] ?? 0) + (from[j] ?? 0);
   return {
     from,
-    owner: Int32Array.from(order, (p) => owners[p] ?? 0),
-    count: Float64Array.from(order, (p) => counts[p] ?? 0),
+    terms: Int32Array.from(order.flatMap((p) => [owners[p] ?? 0, counts[p] ?? 0])),
   };
 }
 
@@ -142,18 +147,32 @@ function pairsOf(
   columns: readonly number[],
   counts: readonly number[],
 ) {
-  const pairs: [at: number, factor: number, owner: number][] = [];
-  const acids: [column: number, factor: number, owner: number][] = [];
+  const pairs: Term[] = [];
+  const squares: Term[] = [];
+  const acids: Term[] = [];
   owners.forEach((owner, p) => {
+    const row = columns[p] ?? 0;
+    const count = counts[p] ?? 0;
+    const overPlain = count * count - count;
+    if (overPlain !== 0) squares.push([row * m + row, overPlain, owner]);
     for (let q = p; owners[q] === owner; q++) {
-      const row = columns[p] ?? 0;
       const column = columns[q] ?? 0;
-      const factor = (counts[p] ?? 0) * (counts[q] ?? 0);
-      pairs.push([row * m + column, factor, owner]);
-      if (row === 0 && (counts[p] ?? 0) > 0) acids.push([column, factor, owner]);
+      const factor = count * (counts[q] ?? 0);
+      if (q > p) pairs.push([row * m + column, factor, owner]);
+      if (row === 0 && count > 0) acids.push([column, factor, owner]);
     }
   });
-  return { pairs: gather(pairs), acidPairs: gather(acids) };
+  const gathered = gather(pairs);
+  const pairPlaces = {
+    rows: gathered.at.map((at) => Math.floor(at / m)),
+    columns: gathered.at.map((at) => at % m),
+  };
+  return {
+    pairs: gathered,
+    pairPlaces,
+    squares: gather(squares),
+    acidPairs: gather(acids),
+  };
 }
 
 type Term = readonly [at: number, factor: number, owner: number];

@@ -11,9 +11,8 @@ export interface Workspace {
   readonly totals: Float64Array;
   readonly lnK: Float64Array;
   readonly molality: Float64Array;
-  /** Molality times the slope of its ln γ, and ½ z² times molality. */
-  readonly steep: Float64Array;
-  readonly half: Float64Array;
+  /** Two to a species: molality times the slope of its ln γ, and ½ z² times molality. */
+  readonly tilt: Float64Array;
   readonly coefficients: CoefficientTable;
   readonly lnGamma: Float64Array;
   readonly slope: Float64Array;
@@ -27,10 +26,12 @@ export interface Workspace {
   readonly ionicBy: Float64Array;
   /** The part of the hydrogen row that comes from species holding H+ over the basis; last entry by ionic strength. */
   readonly acid: Float64Array;
-  /** [½ Σ z² m, minus its derivative by ionic strength, Σ H+ held over the basis]. */
+  /** [½ Σ z² m, minus its derivative by ionic strength, Σ H+ held over the basis, largest residual]. */
   readonly scalars: Float64Array;
   readonly matrix: Float64Array;
   readonly right: Float64Array;
+  /** What each row of the matrix is divided by. */
+  readonly scale: Float64Array;
   readonly pivots: Int32Array;
   readonly stride: number;
   /** The unknowns before the last step. */
@@ -65,8 +66,7 @@ function allocate(system: System): Workspace {
     totals: new Float64Array(m),
     lnK: new Float64Array(n),
     molality: new Float64Array(n),
-    steep: new Float64Array(n),
-    half: new Float64Array(n),
+    tilt: new Float64Array(2 * n),
     coefficients: emptyTable(system.classes.length),
     lnGamma: new Float64Array(system.classes.length),
     slope: new Float64Array(system.classes.length),
@@ -75,9 +75,10 @@ function allocate(system: System): Workspace {
     byIonic: new Float64Array(m),
     ionicBy: new Float64Array(m),
     acid: new Float64Array(m + 1),
-    scalars: new Float64Array(3),
+    scalars: new Float64Array(4),
     matrix: new Float64Array(stride * stride),
     right: new Float64Array(stride),
+    scale: new Float64Array(stride),
     pivots: new Int32Array(stride),
     stride,
     held: new Float64Array(stride),
