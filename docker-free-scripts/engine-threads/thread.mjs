@@ -2,4 +2,4 @@
 import { register } from 'tsx/esm/api';
 
 register();
-await import('./answer-worker.ts');
+await import(new URL('./answer-worker.ts', import.meta.url).href);

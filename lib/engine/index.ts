@@ -49,4 +49,9 @@ export {
   type Sampling,
   type Uncertainty,
 } from './uncertainty/how-sure';
-export { copperSolubilityOf, leadSolubilityOf, type Solubility } from './indices/metal-solubility';
+export {
+  copperOneSolubilityOf,
+  copperSolubilityOf,
+  leadSolubilityOf,
+  type Solubility,
+} from './indices/metal-solubility';

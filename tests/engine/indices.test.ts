@@ -2,7 +2,12 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { hardWater, riverWater, softWater, waterOf } from './support';
 import { anyWater } from './waters';
-import { copperSolubilityOf, indicesOf, leadSolubilityOf } from '@/lib/engine';
+import {
+  copperOneSolubilityOf,
+  copperSolubilityOf,
+  indicesOf,
+  leadSolubilityOf,
+} from '@/lib/engine';
 
 describe('indices by their formulas', () => {
   const water = waterOf(riverWater);
@@ -89,5 +94,20 @@ describe('theoretical metal solubility', () => {
     expect(plain.map((entry) => entry.solid)).not.toContain('hydroxypyromorphite');
     expect(leadSolubilityOf(phosphated)[0]?.solid).toBe('hydroxypyromorphite');
     expect(copperSolubilityOf(waterOf(hardWater))[0]?.mgL).toBeGreaterThan(0);
+  });
+
+  // Cu2O + 2H+ = 2Cu+ + H2O from standard potentials of Cu2O/Cu (0.471 V) and Cu+/Cu (0.521 V), from memory: −1.69.
+  it('of copper(I) is the activity over cuprite that the standard potentials give, in a water without complexers', () => {
+    const bare = waterOf({ temperatureC: 25, pH: 7.5, alkalinityMgLCaCO3: 40, analytesMgL: {} });
+    const [cuprite] = copperOneSolubilityOf(bare);
+    const byPotentials = 10 ** ((2 * (0.471 - 0.521)) / 0.05916 / 2 - 7.5) * 63_546;
+    expect(Math.log10((cuprite?.mgL ?? NaN) / byPotentials)).toBeCloseTo(0, 0.7);
+    expect(cuprite?.mgL).toBeLessThan(copperSolubilityOf(bare)[0]?.mgL ?? NaN);
+  });
+
+  it('of copper(I) rises with chloride, which holds it', () => {
+    const salty = { ...riverWater, analytesMgL: { ...riverWater.analytesMgL, chloride: 210 } };
+    const mgL = (analysis: typeof riverWater) => copperOneSolubilityOf(waterOf(analysis))[0]?.mgL;
+    expect(mgL(salty)).toBeGreaterThan(mgL(riverWater) ?? NaN);
   });
 });

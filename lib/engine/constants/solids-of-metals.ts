@@ -37,6 +37,9 @@ export const SOLIDS_OF_METALS: readonly ConstantRow[] = [
   at25('tenorite', 'CuO + 2H+ = Cu++ + H2O', 7.66, 'epaCopper1995'),
   at25('malachite', 'Cu2(OH)2CO3 = 2Cu++ + 2OH- + CO3--', -33.8, 'epaCopper1995'),
   at25('azurite', 'Cu3(OH)2(CO3)2 = 3Cu++ + 2OH- + 2CO3--', -45.96, 'epaCopper1995'),
+  at25('cuprite', 'Cu2O + 2H+ = 2Cu+ + H2O', -1.55, 'ballNordstrom1991', {
+    note: 'Copper(I); recalled with low confidence. Agrees with E° 0.471 V of Cu2O/Cu and 0.521 V of Cu+/Cu within 0.15.',
+  }),
   at25('zinc-hydroxide', 'Zn(OH)2 + 2H+ = Zn++ + 2H2O', 12.45, 'ballNordstrom1991', {
     note: 'Amorphous.',
   }),

@@ -15,6 +15,7 @@ export interface Solubility {
 
 const LEAD_SOLIDS = ['cerussite', 'hydrocerussite', 'lead-hydroxide', 'hydroxypyromorphite'];
 const COPPER_SOLIDS = ['copper-hydroxide', 'tenorite', 'malachite'];
+const COPPER_I_SOLIDS = ['cuprite'];
 
 /**
  * Theoretical lead solubility by solid, mg/L Pb, least first (Schock's constants, 25 °C). It says which solid a model
@@ -26,6 +27,10 @@ export const leadSolubilityOf = (water: Water): readonly Solubility[] =>
 /** The same for copper(II), mg/L Cu (EPA/600/R-95/085, 25 °C). New pipes follow the hydroxide, old ones the others. */
 export const copperSolubilityOf = (water: Water): readonly Solubility[] =>
   solubilities(water, 'Cu2', COPPER_SOLIDS);
+
+/** Copper(I) beside cuprite, mg/L Cu, 25 °C: what a water without oxidant, stagnant in a copper pipe, would hold. */
+export const copperOneSolubilityOf = (water: Water): readonly Solubility[] =>
+  solubilities(water, 'Cu1', COPPER_I_SOLIDS);
 
 function solubilities(
   water: Water,

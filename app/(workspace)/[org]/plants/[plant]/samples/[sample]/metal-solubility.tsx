@@ -1,4 +1,10 @@
-import { copperSolubilityOf, leadSolubilityOf, type Solubility, type Water } from '@/lib/engine';
+import {
+  copperOneSolubilityOf,
+  copperSolubilityOf,
+  leadSolubilityOf,
+  type Solubility,
+  type Water,
+} from '@/lib/engine';
 import { Figure } from '@/components/ui/figure';
 import { formatSignificant } from '@/lib/format';
 
@@ -9,7 +15,8 @@ const MOST_MG_L = 20;
 export function MetalSolubility({ water }: { water: Water }) {
   const metals = [
     { name: 'Lead', rows: leadSolubilityOf(water) },
-    { name: 'Copper', rows: copperSolubilityOf(water) },
+    { name: 'Copper(II)', rows: copperSolubilityOf(water) },
+    { name: 'Copper(I), water without oxidant', rows: copperOneSolubilityOf(water) },
   ];
   return (
     <details className="border-b border-rule">

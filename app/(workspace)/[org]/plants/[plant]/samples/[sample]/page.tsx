@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
+import { HowSure } from '@/components/how-sure/how-sure';
 import { IndexList } from '@/components/ledger/index-list';
 import { IndexNotes } from '@/components/ledger/index-notes';
 import { buttonClass } from '@/components/ui/button';
@@ -18,6 +19,15 @@ import { ResultTable } from './result-table';
 
 export const metadata: Metadata = { title: 'Sample' };
 
+/** Indices whose uncertainty an operator acts on. */
+const BANDED = [
+  'calciteIndex',
+  'langelier',
+  'precipitationPotential',
+  'bufferIntensity',
+  'carbonDioxide',
+] as const;
+
 export default async function SamplePage({
   params,
 }: {
@@ -26,7 +36,8 @@ export default async function SamplePage({
   const { actor, plant } = await pagePlant(params, 'sample.read');
   const sample = await orNotFound(getSample(actor, plant, (await params).sample));
   const organisationSlug = actor.organisation.slug;
-  const solved = solveSample(measuredValues(sample.results));
+  const values = measuredValues(sample.results);
+  const solved = solveSample(values);
   const isSolved = sample.solution !== null && sample.solution.refusal === null;
   return (
     <>
@@ -78,6 +89,7 @@ export default async function SamplePage({
             <>
               <IndexList indices={sample.indices} shown={INDEX_KEYS} />
               <IndexNotes shown={INDEX_KEYS} />
+              <HowSure values={values} shown={BANDED} />
               {solved.ok ? <MetalSolubility water={solved.water} /> : null}
             </>
           ) : (
