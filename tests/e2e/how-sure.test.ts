@@ -31,7 +31,9 @@ describe('how sure a sample is', () => {
     });
     await page.getByRole('button', { name: 'Draw the band' }).click();
     await page.getByText('In nine of ten draws').waitFor();
-    const frames = await page.evaluate(() => (window as unknown as { frames?: number }).frames ?? 0);
+    const frames = await page.evaluate(
+      () => (window as unknown as { frames?: number }).frames ?? 0,
+    );
     expect(frames).toBeGreaterThan(2);
     const row = page.getByRole('row', { name: /^Calcite saturation index/ });
     const [low, middle, high] = (await row.getByRole('cell').allTextContents()).map((text) =>

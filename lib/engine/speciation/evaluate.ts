@@ -16,7 +16,7 @@ export function evaluate(workspace: Workspace): void {
 
 /** Molalities, their slopes by ionic strength, half their squared charge, and ionic strength itself. */
 function fillMolalities(workspace: Workspace): void {
-  const { system, unknowns, lnK, molality, tilt, lnGamma, slope, scalars } = workspace;
+  const { system, unknowns, lnK, molality, steep, lnGamma, slope, scalars } = workspace;
   const { from, terms, halfSquare, classIndex } = system;
   const n = molality.length;
   const m = workspace.sums.length;
@@ -38,8 +38,7 @@ function fillMolalities(workspace: Workspace): void {
     const strength = (halfSquare[i] as number) * amount;
     const by = slope[classIndex[i] as number] as number;
     molality[i] = amount;
-    tilt[2 * i] = amount * by;
-    tilt[2 * i + 1] = strength;
+    steep[i] = amount * by;
     ionic += strength;
     ionicSlope += strength * by;
   }
@@ -48,8 +47,16 @@ function fillMolalities(workspace: Workspace): void {
 }
 
 /** Σ ν m of each component; with it, at little cost beside, its derivative by ionic strength and of that by it. */
-function addBalances({ system, molality, tilt, sums, byIonic, ionicBy, scalars }: Workspace): void {
-  const { from, terms, acids, hydrogen } = system;
+function addBalances({
+  system,
+  molality,
+  steep,
+  sums,
+  byIonic,
+  ionicBy,
+  scalars,
+}: Workspace): void {
+  const { from, terms, termStrength, acids, hydrogen } = system;
   for (let j = 0; j < sums.length; j++) {
     let sum = 0;
     let sumSteep = 0;
@@ -58,9 +65,10 @@ function addBalances({ system, molality, tilt, sums, byIonic, ionicBy, scalars }
     for (let p = 2 * (from[j] as number); p < to; p += 2) {
       const i = terms[p] as number;
       const nu = terms[p + 1] as number;
-      sum += nu * (molality[i] as number);
-      sumSteep += nu * (tilt[2 * i] as number);
-      sumHalf += nu * (tilt[2 * i + 1] as number);
+      const amount = molality[i] as number;
+      sum += nu * amount;
+      sumSteep += nu * (steep[i] as number);
+      sumHalf += (termStrength[p >> 1] as number) * amount;
     }
     sums[j] = sum;
     byIonic[j] = sumSteep;

@@ -23,7 +23,7 @@ export function fillJacobian(w: Workspace, problem: Problem): void {
 
 /** Derivatives of the balances by ln activities, and of the acids alone by everything. */
 function differentiate(workspace: Workspace): void {
-  const { system, molality, tilt, sums, products, acid } = workspace;
+  const { system, molality, steep, sums, products, acid } = workspace;
   const m = system.components.length;
   for (let j = 0; j < m; j++) products[j * m + j] = sums[j] as number;
   sumInto(products, system.pairs, molality);
@@ -32,7 +32,7 @@ function differentiate(workspace: Workspace): void {
   let sumSteep = 0;
   for (let s = 0; s < system.acids.length; s++) {
     const i = system.acids[s] as number;
-    sumSteep += (system.hydrogen[i] as number) * (tilt[2 * i] as number);
+    sumSteep += (system.hydrogen[i] as number) * (steep[i] as number);
   }
   acid[m] = sumSteep;
 }
@@ -62,23 +62,24 @@ function addInto(target: Float64Array, terms: Gather, molality: Float64Array): v
 
 /** The mass balance of every component in its own row. Few pairs of components share a species: the rest stays zero. */
 function massRows(w: Workspace, m: number): void {
-  const { matrix, products, scale, byIonic, stride, system } = w;
+  const { matrix, products, scale, inverse, byIonic, stride, system } = w;
   const { rows, columns } = system.pairPlaces;
   const last = m - 1;
+  for (let place = 0; place < m; place++) inverse[place] = 1 / (scale[place] as number);
   for (let e = 0; e < rows.length; e++) {
     const j = rows[e] as number;
     const k = columns[e] as number;
     const shared = products[j * m + k] as number;
-    matrix[(last - j) * stride + last - k] = shared / (scale[last - j] as number);
-    matrix[(last - k) * stride + last - j] = shared / (scale[last - k] as number);
+    matrix[(last - j) * stride + last - k] = shared * (inverse[last - j] as number);
+    matrix[(last - k) * stride + last - j] = shared * (inverse[last - k] as number);
   }
   for (let j = 0; j < m; j++) {
     const place = last - j;
     const base = place * stride;
-    const inverse = 1 / (scale[place] as number);
-    matrix[base + place] = (products[j * m + j] as number) * inverse;
-    matrix[base + m] = -(byIonic[j] as number) * inverse;
-    if (w.activeSolids > 0) solidsInRow(w, m, j, base, inverse);
+    const by = inverse[place] as number;
+    matrix[base + place] = (products[j * m + j] as number) * by;
+    matrix[base + m] = -(byIonic[j] as number) * by;
+    if (w.activeSolids > 0) solidsInRow(w, m, j, base, by);
   }
 }
 

@@ -26,6 +26,8 @@ export interface System {
   /** Composition by component: run from[j] … from[j + 1] of pairs in `terms`, a species and its moles of j. */
   readonly from: Int32Array;
   readonly terms: Int32Array;
+  /** Moles of j times ½ z² of the species, term by term. */
+  readonly termStrength: Float64Array;
   /** Σ count · count · molality above the diagonal (row-major). */
   readonly pairs: Gather;
   /** Row and column of each entry of `pairs`. */
@@ -98,7 +100,7 @@ function compile(mask: number): System {
     species,
     charges: Float64Array.from(species, (entry) => entry.charge),
     halfSquare: Float64Array.from(species, (entry) => 0.5 * entry.charge * entry.charge),
-    ...byComponent(components.length, owners, columns, counts),
+    ...byComponent(components.length, owners, columns, counts, species),
     ...pairsOf(components.length, owners, columns, counts),
     hydrogen: Float64Array.from(species, (entry) => entry.composition[0] ?? 0),
     acids: Int32Array.from(
@@ -129,6 +131,7 @@ function byComponent(
   owners: readonly number[],
   columns: readonly number[],
   counts: readonly number[],
+  species: readonly Entry[],
 ) {
   const order = columns.map((_, p) => p).sort((a, b) => (columns[a] ?? 0) - (columns[b] ?? 0));
   const from = new Int32Array(m + 1);
@@ -137,6 +140,10 @@ function byComponent(
   return {
     from,
     terms: Int32Array.from(order.flatMap((p) => [owners[p] ?? 0, counts[p] ?? 0])),
+    termStrength: Float64Array.from(
+      order,
+      (p) => 0.5 * (species[owners[p] ?? 0]?.charge ?? 0) ** 2 * (counts[p] ?? 0),
+    ),
   };
 }
 

@@ -11,8 +11,8 @@ export interface Workspace {
   readonly totals: Float64Array;
   readonly lnK: Float64Array;
   readonly molality: Float64Array;
-  /** Two to a species: molality times the slope of its ln γ, and ½ z² times molality. */
-  readonly tilt: Float64Array;
+  /** Molality times the slope of its ln γ. */
+  readonly steep: Float64Array;
   readonly coefficients: CoefficientTable;
   readonly lnGamma: Float64Array;
   readonly slope: Float64Array;
@@ -32,6 +32,7 @@ export interface Workspace {
   readonly right: Float64Array;
   /** What each row of the matrix is divided by. */
   readonly scale: Float64Array;
+  readonly inverse: Float64Array;
   readonly pivots: Int32Array;
   readonly stride: number;
   /** The unknowns before the last step. */
@@ -66,7 +67,7 @@ function allocate(system: System): Workspace {
     totals: new Float64Array(m),
     lnK: new Float64Array(n),
     molality: new Float64Array(n),
-    tilt: new Float64Array(2 * n),
+    steep: new Float64Array(n),
     coefficients: emptyTable(system.classes.length),
     lnGamma: new Float64Array(system.classes.length),
     slope: new Float64Array(system.classes.length),
@@ -79,6 +80,7 @@ function allocate(system: System): Workspace {
     matrix: new Float64Array(stride * stride),
     right: new Float64Array(stride),
     scale: new Float64Array(stride),
+    inverse: new Float64Array(stride),
     pivots: new Int32Array(stride),
     stride,
     held: new Float64Array(stride),
