@@ -8,7 +8,17 @@ const config: NextConfig = {
   // Types are checked once, over everything, by `npm run types` (the first stage of `npm test`); the build need not do it again.
   typescript: { ignoreBuildErrors: true },
   // Native and dynamic modules that the bundler must leave to Node.
-  serverExternalPackages: ['knex', 'pg', 'rate-limiter-flexible', '@node-rs/argon2', 'pino'],
+  serverExternalPackages: [
+    'knex',
+    'pg',
+    'rate-limiter-flexible',
+    '@node-rs/argon2',
+    'pino',
+    'nodemailer',
+    'mailparser',
+  ],
+  // Forms, never files: uploads will have a route of their own.
+  experimental: { serverActions: { bodySizeLimit: '512kb' } },
 };
 
 export default config;

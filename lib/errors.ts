@@ -5,9 +5,14 @@ export const ERROR_STATUS = {
   forbidden: 403,
   notFound: 404,
   conflict: 409,
+  preconditionFailed: 412,
+  tooLarge: 413,
+  unsupportedType: 415,
+  preconditionRequired: 428,
   engineRefused: 422,
   tooMany: 429,
   internal: 500,
+  unavailable: 503,
 } as const;
 
 export type ErrorCode = keyof typeof ERROR_STATUS;

@@ -10,6 +10,9 @@ const PREFIX = {
   shiftNote: 'nte',
   sample: 'smp',
   plan: 'pln',
+  invitation: 'inv',
+  apiToken: 'tok',
+  feedEntry: 'fed',
 } as const;
 
 export type IdKind = keyof typeof PREFIX;

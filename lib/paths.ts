@@ -11,9 +11,29 @@ function queryOf(shown: Readonly<Record<string, string | number | undefined>>): 
 export const paths = {
   home: '/',
   signIn: '/sign-in',
+  signInRefused: '/sign-in?refused=unknown',
+  signUp: '/sign-up',
+  forgotten: '/forgotten-password',
+  // The secret of a link stands behind the #, which a browser sends to no server and no log.
+  confirmAddress: (secret = '') => `/confirm-address${secret === '' ? '' : `#${secret}`}`,
+  newPassword: (secret = '') => `/new-password${secret === '' ? '' : `#${secret}`}`,
+  invitation: (secret = '') => `/invitation${secret === '' ? '' : `#${secret}`}`,
+  account: '/account',
+  outbox: '/outbox',
+  apiGuide: '/api-guide',
+  openApi: '/api/v1/openapi.json',
   organisation: (org: string) => `/${org}`,
-  audit: (org: string, shown: { action?: string; page?: number } = {}) =>
-    `/${org}/audit${queryOf(shown)}`,
+  audit: (
+    org: string,
+    shown: { action?: string; person?: string; from?: string; to?: string; page?: number } = {},
+  ) => `/${org}/audit${queryOf(shown)}`,
+  auditExport: (
+    org: string,
+    shown: { action?: string; person?: string; from?: string; to?: string } = {},
+  ) => `/api/v1/${org}/audit.csv${queryOf(shown)}`,
+  people: (org: string) => `/${org}/people`,
+  tokens: (org: string) => `/${org}/tokens`,
+  targets: (org: string, plant: string) => `/${org}/plants/${plant}/targets`,
   today: (org: string, plant: string) => `/${org}/plants/${plant}`,
   samples: (org: string, plant: string, shown: { point?: string; page?: number } = {}) =>
     `/${org}/plants/${plant}/samples${queryOf(shown)}`,

@@ -3,6 +3,7 @@
 import Link from 'next/link';
 import { useParams } from 'next/navigation';
 import { paths } from '@/lib/paths';
+import { LinkPending } from './link-pending';
 
 /** The works as index tabs cut into the top edge of the page. */
 export function PlantTabs({
@@ -23,13 +24,14 @@ export function PlantTabs({
               <Link
                 href={paths.today(organisationSlug, slug)}
                 aria-current={isCurrent ? 'true' : undefined}
-                className={`flex min-h-touch items-center border border-b-0 px-4 font-head no-underline max-sm:px-2.5 ${
+                className={`relative flex min-h-touch items-center border border-b-0 px-4 font-head no-underline max-sm:px-2.5 ${
                   isCurrent
                     ? 'border-rule-strong bg-chalk-sheet font-semibold text-ink'
                     : 'border-transparent text-ink-soft hover:bg-chalk-shade hover:text-ink'
                 }`}
               >
                 {name}
+                <LinkPending />
               </Link>
             </li>
           );

@@ -57,20 +57,60 @@ export async function listAuditTrail(db: Database, organisationId: string): Prom
   return rows.map(toEntry);
 }
 
-/** The newest entries, newest first, of one action or of all. */
+export interface AuditFilter {
+  action?: string;
+  actorId?: string;
+  from?: Date;
+  before?: Date;
+}
+
+const filtered = (db: Database, organisationId: string, filter: AuditFilter) => {
+  const query = db<AuditEntryRow>('audit_entries').where({ organisation_id: organisationId });
+  if (filter.action !== undefined) void query.where({ action: filter.action });
+  if (filter.actorId !== undefined) void query.where({ actor_id: filter.actorId });
+  if (filter.from !== undefined) void query.where('at', '>=', filter.from);
+  if (filter.before !== undefined) void query.where('at', '<', filter.before);
+  return query;
+};
+
+/** The newest entries that pass the filter, newest first. */
 export async function listAuditEntries(
   db: Database,
   organisationId: string,
-  filter: { action?: string; limit: number; offset: number },
+  filter: AuditFilter & { limit: number; offset: number },
 ): Promise<{ entries: AuditEntry[]; total: number }> {
-  const filtered = () => {
-    const query = db<AuditEntryRow>('audit_entries').where({ organisation_id: organisationId });
-    return filter.action === undefined ? query : query.where({ action: filter.action });
-  };
-  const rows = await filtered()
+  const rows = await filtered(db, organisationId, filter)
     .orderBy('position', 'desc')
     .limit(filter.limit)
     .offset(filter.offset);
-  const [counted] = await filtered().count<{ count: number }[]>('* as count');
+  const [counted] = await filtered(db, organisationId, filter).count<{ count: number }[]>(
+    '* as count',
+  );
   return { entries: rows.map(toEntry), total: counted?.count ?? 0 };
+}
+
+/** Entries older than a position, newest first, for pages by cursor. */
+export async function listAuditBefore(
+  db: Database,
+  organisationId: string,
+  filter: AuditFilter,
+  position: number | null,
+  limit: number,
+): Promise<AuditEntry[]> {
+  const query = filtered(db, organisationId, filter).orderBy('position', 'desc').limit(limit);
+  if (position !== null) void query.where('position', '<', position);
+  return (await query).map(toEntry);
+}
+
+/** Everyone who stands in a trail, by name: whom it can be filtered by. */
+export async function listAuditActors(
+  db: Database,
+  organisationId: string,
+): Promise<{ id: string; name: string }[]> {
+  const rows = await db<AuditEntryRow>('audit_entries')
+    .where({ organisation_id: organisationId })
+    .groupBy('actor_id')
+    .select<{ actor_id: string; name: string }[]>('actor_id', db.raw('min(actor_name) as name'))
+    .orderBy('name');
+  return rows.map(({ actor_id, name }) => ({ id: actor_id, name }));
 }

@@ -154,3 +154,22 @@ export async function listPlans(
     .limit(limit);
   return withDoses(db, organisationId, rows);
 }
+
+/** Plans of a plant before a place in the list, newest first. */
+export async function listPlansBefore(
+  db: Database,
+  organisationId: string,
+  plantId: string,
+  { before, limit }: { before: readonly [at: Date, id: string] | null; limit: number },
+): Promise<KeptPlan[]> {
+  const query = plansOf(db, organisationId, plantId)
+    // A place in the list is told to the millisecond, so the order must not look closer.
+    .orderByRaw(`date_trunc('milliseconds', plans.created_at) desc, plans.id desc`)
+    .limit(limit);
+  if (before !== null) {
+    void query.whereRaw(`(date_trunc('milliseconds', plans.created_at), plans.id) < (?, ?)`, [
+      ...before,
+    ]);
+  }
+  return withDoses(db, organisationId, await query);
+}

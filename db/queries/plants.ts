@@ -91,14 +91,48 @@ export async function listTargets(
     .where({ organisation_id: organisationId })
     .whereIn('point_id', pointIdsOf(db, organisationId, plantId))
     .orderBy('quantity');
-  return rows.map((row) => ({
-    pointId: row.point_id,
-    quantity: row.quantity,
-    lowest: row.lowest,
-    highest: row.highest,
-    preferred: row.preferred,
-    basis: row.basis,
-  }));
+  return rows.map(toTarget);
+}
+
+const toTarget = (row: TargetRow): Target => ({
+  id: row.id,
+  version: row.version,
+  pointId: row.point_id,
+  quantity: row.quantity,
+  lowest: row.lowest,
+  highest: row.highest,
+  preferred: row.preferred,
+  basis: row.basis,
+});
+
+/** One target of a plant, held until the transaction ends, or nothing. */
+export async function lockTarget(
+  db: Database,
+  organisationId: string,
+  plantId: string,
+  targetId: string,
+): Promise<Target | undefined> {
+  const row = await db<TargetRow>('targets')
+    .where({ organisation_id: organisationId, id: targetId })
+    .whereIn('point_id', pointIdsOf(db, organisationId, plantId))
+    .forUpdate()
+    .first();
+  return row && toTarget(row);
+}
+
+/** Writes new bounds under the next version. */
+export async function updateTarget(
+  db: Database,
+  organisationId: string,
+  target: Target,
+  now: Date,
+): Promise<Target> {
+  const { lowest, highest, preferred, basis, version } = target;
+  const next = version + 1;
+  await db<TargetRow>('targets')
+    .where({ organisation_id: organisationId, id: target.id })
+    .update({ lowest, highest, preferred, basis, version: next, changed_at: now });
+  return { ...target, version: next };
 }
 
 const pointIdsOf = (db: Database, organisationId: string, plantId: string) =>

@@ -12,14 +12,104 @@ export interface PersonRow {
   id: string;
   email: string;
   name: string;
-  password_hash: string;
+  password_hash: string | null;
   created_at: Date;
+  email_verified_at: Date | null;
+  session_epoch: number;
+  totp_secret: string | null;
+  totp_confirmed_at: Date | null;
+  totp_last_step: number;
 }
 
 export interface MembershipRow {
   organisation_id: string;
   person_id: string;
   role: 'operator' | 'consultant' | 'manager' | 'owner';
+  all_plants: boolean;
+  created_at: Date;
+  left_at: Date | null;
+}
+
+export interface MembershipPlantRow {
+  organisation_id: string;
+  person_id: string;
+  plant_id: string;
+}
+
+export interface OneTimeTokenRow {
+  token_hash: string;
+  person_id: string;
+  purpose: 'verify-email' | 'reset-password';
+  expires_at: Date;
+  used_at: Date | null;
+  created_at: Date;
+}
+
+export interface RecoveryCodeRow {
+  person_id: string;
+  code_hash: string;
+  used_at: Date | null;
+}
+
+export interface ExternalIdentityRow {
+  identity_hash: string;
+  person_id: string;
+  provider: string;
+  linked_at: Date;
+}
+
+export interface InvitationRow {
+  id: string;
+  organisation_id: string;
+  email: string;
+  role: MembershipRow['role'];
+  plant_ids: string[] | null;
+  token_hash: string;
+  invited_by: string;
+  created_at: Date;
+  expires_at: Date;
+  accepted_at: Date | null;
+  revoked_at: Date | null;
+}
+
+export interface ApiTokenRow {
+  id: string;
+  organisation_id: string;
+  name: string;
+  prefix: string;
+  token_hash: string;
+  scopes: string[];
+  plant_ids: string[] | null;
+  made_by: string;
+  created_at: Date;
+  expires_at: Date;
+  last_used_at: Date | null;
+  revoked_at: Date | null;
+}
+
+export interface IdempotencyKeyRow {
+  organisation_id: string;
+  actor_id: string;
+  key: string;
+  request_hash: string;
+  status: number | null;
+  body: unknown;
+  created_at: Date;
+}
+
+export interface FeedLogRow {
+  id: string;
+  organisation_id: string;
+  plant_id: string;
+  dosing_point_id: string;
+  client_key: string;
+  fed_from: Date;
+  fed_to: Date;
+  product_kg: number;
+  water_treated_ml: number | null;
+  note: string;
+  logged_by: string;
+  logged_at: Date;
 }
 
 export interface PlantRow {
@@ -64,6 +154,8 @@ export interface TargetRow {
   highest: number | null;
   preferred: number | null;
   basis: string;
+  version: number;
+  changed_at: Date;
 }
 
 export interface TrainStepRow {

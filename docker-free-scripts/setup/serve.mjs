@@ -1,6 +1,7 @@
 import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { ensureBuild, NEXT } from './build.mjs';
+import { openMail } from './mail.mjs';
 import { checkNodeVersion, ensureNodeModules } from './node-modules.mjs';
 import { STATE } from './places.mjs';
 import { isPortFree } from './ports.mjs';
@@ -35,6 +36,7 @@ export async function serve({ reload }) {
     if (!reload) await ensureBuild('.next');
     stop.check();
     const address = `http://127.0.0.1:${port}`;
+    const mail = await openMail(supervisor, join(STATE, 'outbox'));
     await supervisor.start({
       name: 'web',
       command: process.execPath,
@@ -45,13 +47,14 @@ export async function serve({ reload }) {
         NEXTAUTH_URL: address,
         NEXTAUTH_SECRET: process.env.NEXTAUTH_SECRET ?? secrets.sessionSecret,
         DATABASE_URL: database.appUrl,
+        ...mail,
       },
       healthUrl: `${address}/api/health`,
       echo: reload,
     });
     stop.check();
     writeFileSync(PID_FILE, JSON.stringify({ pid: process.pid, address }));
-    announce(address, signIns);
+    announce(address, signIns, 'MARLWICK_OUTBOX' in mail);
     const why = await Promise.race([stop.told, supervisor.fallen]);
     say(why === undefined ? '\nStopping Marlwick.' : why);
     return why === undefined ? 0 : 1;
@@ -65,12 +68,15 @@ export async function serve({ reload }) {
 /**
  * @param {string} address
  * @param {import('./product-database.mjs').DemoSignIn[]} signIns
+ * @param {boolean} hasOutbox
  */
-function announce(address, signIns) {
+function announce(address, signIns, hasOutbox) {
   say(`\nMarlwick is running at ${address}\n`);
   for (const { role, email, password } of signIns) {
     say(`  ${role.padEnd(11)} ${email.padEnd(34)} ${password}`);
   }
+  if (hasOutbox)
+    say(`\nE-mails go nowhere but to ${address}/outbox (set SMTP_URL for a real server).`);
   say('\nThe demo is invented. Ctrl-C stops everything started here.');
 }
 

@@ -14,6 +14,7 @@ const HEALTH_PAUSE_MS = 150;
  * @property {string[]} args
  * @property {Record<string, string | undefined>} [env]
  * @property {string} [healthUrl] answers 200 once the program is ready
+ * @property {() => Promise<boolean>} [isReady] for a program that answers otherwise
  * @property {number} [healthWithinMs]
  * @property {boolean} [echo] show its output instead of keeping it in a log
  */
@@ -45,7 +46,9 @@ export class Supervisor {
           `${program.name} ended unexpectedly (${how}); ${logPath(program.name)} says why.`,
         );
     });
-    if (program.healthUrl !== undefined) await this.#untilHealthy(running, program.healthUrl);
+    const { healthUrl } = program;
+    const isReady = program.isReady ?? (healthUrl === undefined ? null : () => answers(healthUrl));
+    if (isReady !== null) await this.#untilReady(running, isReady);
   }
 
   /**
@@ -79,9 +82,9 @@ export class Supervisor {
 
   /**
    * @param {Running} running
-   * @param {string} url
+   * @param {() => Promise<boolean>} isReady
    */
-  async #untilHealthy({ program, ended }, url) {
+  async #untilReady({ program, ended }, isReady) {
     const deadline = Date.now() + (program.healthWithinMs ?? 60_000);
     /** @type {string | null} */
     let dead = null;
@@ -93,9 +96,7 @@ export class Supervisor {
         throw new PlainProblem(
           `${program.name} ended while starting (${String(dead)}); ${logPath(program.name)} says why.`,
         );
-      const answer = await fetch(url, { signal: AbortSignal.timeout(5_000) }).catch(() => null);
-      await answer?.body?.cancel();
-      if (answer?.ok === true) return;
+      if (await isReady()) return;
       await new Promise((resolve) => setTimeout(resolve, HEALTH_PAUSE_MS));
     }
     throw new PlainProblem(
@@ -121,6 +122,13 @@ export class Supervisor {
     this.#isStopping = true;
     for (const { child } of this.#running) signalGroup(child.pid, 'SIGKILL');
   }
+}
+
+/** @param {string} url */
+async function answers(url) {
+  const answer = await fetch(url, { signal: AbortSignal.timeout(5_000) }).catch(() => null);
+  await answer?.body?.cancel();
+  return answer?.ok === true;
 }
 
 /**

@@ -18,7 +18,10 @@ export async function recordChange(
     position: (last?.position ?? 0) + 1,
     at: clock(),
     actorId: actor.personId,
-    actorName: actor.personName,
+    actorName:
+      actor.token === null
+        ? actor.personName
+        : `${actor.personName}, by API token ${actor.token.name}`,
     action,
     subjectId,
     detail,

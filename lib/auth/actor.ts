@@ -4,20 +4,32 @@ import { notFound as nextNotFound, redirect } from 'next/navigation';
 import { cache } from 'react';
 import { AppError } from '@/lib/errors';
 import { paths } from '@/lib/paths';
-import { enter, type Actor } from './door';
-import type { Permission } from './permissions';
+import { enter, type Actor, type Credential } from './door';
 import { authOptions } from './options';
+import type { Permission } from './permissions';
+import { findSignedIn, type SignedInPerson } from './signed-in';
 
-/** The signed-in person's id, or null. Read once per request. */
-export const signedInPersonId = cache(async (): Promise<string | null> => {
-  const session = await getServerSession(authOptions);
-  return session?.personId ?? null;
+/** What this request's cookie says, unchecked. Read once per request. */
+export const sessionCredential = cache(async (): Promise<Credential> => {
+  const session = await getServerSession(authOptions());
+  if (session === null || session.personId === '') return null;
+  return { kind: 'session', personId: session.personId, epoch: session.epoch };
 });
 
-/** The actor of this request, for actions and route handlers. Throws `AppError` when the door stays shut. */
+/** The signed-in person, checked against the database: null when signed out, or signed out everywhere since. */
+export const signedInPerson = cache(async (): Promise<SignedInPerson | null> =>
+  findSignedIn(await sessionCredential()),
+);
+
+/** The person of a page that belongs to them alone; anyone signed out goes to sign in. */
+export async function pagePerson(): Promise<SignedInPerson> {
+  return (await signedInPerson()) ?? redirect(paths.signIn);
+}
+
+/** The actor of this request's session, for pages and actions. Throws `AppError` when the door stays shut. */
 export const actorFor = cache(
   async (organisationSlug: string, permission: Permission): Promise<Actor> =>
-    enter(await signedInPersonId(), organisationSlug, permission),
+    enter(await sessionCredential(), organisationSlug, permission),
 );
 
 /** The actor of this page: signed out goes to sign in, what is not theirs is not found. */

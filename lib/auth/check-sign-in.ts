@@ -1,33 +1,69 @@
-import { findPersonByEmail } from '@/db/queries/people';
+import { findPersonByEmail, type AccountPerson } from '@/db/queries/people';
 import { inContext } from '@/db/tenant';
 import { AppError } from '@/lib/errors';
+import { systemClock, type Clock } from '@/lib/clock';
+import { logger } from '@/lib/logger';
 import { signInInput } from '@/lib/people/schema';
+import { countTryOf, forgetTriesOf, refuseWhenClosed } from './limits';
 import { hashPassword, verifyPassword } from './passwords';
-import { countWrongPassword, forgetWrongPasswords, signInBlockedForS } from './sign-in-limit';
+import { takeSecondFactor } from './second-factor';
+import { SECOND_FACTOR_NEEDED } from './sign-in-words';
 
 let unknownPersonHash: Promise<string> | undefined;
 
+export interface SignedIn {
+  readonly id: string;
+  readonly name: string;
+  readonly email: string;
+  readonly epoch: number;
+}
+
 /**
- * The person whose e-mail and password these are, or null. An unknown address costs the same time and the same tries as
- * a known one. Throws `tooMany` while an address is closed after too many wrong passwords.
+ * The person whose e-mail, password and, where they use one, second factor these are, or null. An unknown address costs
+ * the same time and the same tries as a known one; anything more is said only to someone who knows the password.
+ * Throws `tooMany` while an address is closed after too many wrong tries.
  */
 export async function checkSignIn(
   credentials: unknown,
-): Promise<{ id: string; name: string; email: string } | null> {
+  clock: Clock = systemClock,
+): Promise<SignedIn | null> {
   const parsed = signInInput.safeParse(credentials);
   if (!parsed.success) return null;
-  const { email, password } = parsed.data;
-  if ((await signInBlockedForS(email)) > 0) {
-    throw new AppError('tooMany', 'Too many wrong passwords. Wait a quarter of an hour.');
-  }
+  const { email, password, code } = parsed.data;
+  await refuseWhenClosed('sign-in', email);
   const person = await inContext({ signInEmail: email }, (db) => findPersonByEmail(db, email));
   unknownPersonHash ??= hashPassword(crypto.randomUUID());
   const hash = person?.passwordHash ?? (await unknownPersonHash);
   const matches = await verifyPassword(hash, password);
-  if (person === undefined || !matches) {
-    await countWrongPassword(email);
+  if (person === undefined || person.passwordHash === null || !matches) {
+    await countTryOf('sign-in', email);
+    logger.warn({ event: 'sign-in-refused', personId: person?.id }, 'wrong e-mail or password');
     return null;
   }
-  await forgetWrongPasswords(email);
-  return { id: person.id, name: person.name, email: person.email };
+  if (person.emailVerifiedAt === null) {
+    throw new AppError(
+      'forbidden',
+      'Confirm your address first, by the link we sent you. “Forgotten password” sends another.',
+    );
+  }
+  await requireSecondFactor(person, email, code, clock);
+  await forgetTriesOf('sign-in', email);
+  return { id: person.id, name: person.name, email: person.email, epoch: person.sessionEpoch };
+}
+
+async function requireSecondFactor(
+  person: AccountPerson,
+  email: string,
+  code: string,
+  clock: Clock,
+): Promise<void> {
+  if (person.totpConfirmedAt === null) return;
+  if (code === '') throw new AppError('forbidden', SECOND_FACTOR_NEEDED);
+  if (await takeSecondFactor(person, code, clock)) return;
+  await countTryOf('sign-in', email);
+  logger.warn({ event: 'second-factor-refused', personId: person.id }, 'wrong second factor');
+  throw new AppError(
+    'forbidden',
+    'This code is not the one of now. Wait for the next, and try it.',
+  );
 }

@@ -1,4 +1,4 @@
-import { findPlan, listPlans, type KeptPlan } from '@/db/queries/plans';
+import { findPlan, listPlans, listPlansBefore, type KeptPlan } from '@/db/queries/plans';
 import type { Actor } from '@/lib/auth/door';
 import { inTenant } from '@/lib/auth/in-tenant';
 import { notFound } from '@/lib/errors';
@@ -16,3 +16,11 @@ export async function getPlan(actor: Actor, plant: Plant, planId: string): Promi
 /** The newest plans of a plant, newest first. */
 export const readPlans = (actor: Actor, plant: Plant): Promise<KeptPlan[]> =>
   inTenant(actor, (db) => listPlans(db, actor.organisation.id, plant.id, PLANS_SHOWN));
+
+/** Plans before a place in the list, newest first. */
+export const readPlansFrom = (
+  actor: Actor,
+  plant: Plant,
+  asked: { before: readonly [Date, string] | null; limit: number },
+): Promise<KeptPlan[]> =>
+  inTenant(actor, (db) => listPlansBefore(db, actor.organisation.id, plant.id, asked));

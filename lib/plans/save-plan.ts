@@ -26,7 +26,8 @@ export async function savePlan(actor: Actor, input: PlanInput): Promise<{ planId
   if (!before.ok) throw new AppError('engineRefused', before.refusal);
   const after = applyDose(before.water, { reagent: input.reagent, doseMgL: input.doseMgL });
   if (!after.ok) throw new AppError('engineRefused', after.message);
-  if (Math.abs(after.water.pH - input.previewedPH) > PREVIEW_TOLERANCE_PH) {
+  const { previewedPH = after.water.pH } = input;
+  if (Math.abs(after.water.pH - previewedPH) > PREVIEW_TOLERANCE_PH) {
     throw new AppError(
       'conflict',
       'The plan on your screen no longer matches this sample. Load the page again and look at the new figures before saving.',

@@ -19,7 +19,7 @@ export const planInput = z.object({
     value: z.number(),
   }),
   /** What the browser showed when the person saved; the server's own answer must agree. */
-  previewedPH: z.number(),
+  previewedPH: z.number().optional(),
   reason: z.string().trim().max(2000, 'A reason has at most 2000 characters.'),
 });
 

@@ -34,6 +34,9 @@ export interface PointQuantity {
 
 /** In the quantity's canonical unit. */
 export interface Target {
+  readonly id: string;
+  /** Raised by every change: a change names the version it was made from. */
+  readonly version: number;
   readonly pointId: string;
   readonly quantity: string;
   readonly lowest: number | null;

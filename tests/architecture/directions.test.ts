@@ -137,6 +137,12 @@ describe('import directions', () => {
     ).toEqual([]);
   });
 
+  it('nodemailer is known to lib/mail alone', () => {
+    expect(violations((file) => file !== 'lib/mail/transport.ts', isPackage('nodemailer'))).toEqual(
+      [],
+    );
+  });
+
   it('chart.js is drawn only in components/charts', () => {
     expect(
       violations(
@@ -163,11 +169,12 @@ describe('import directions', () => {
     const ORDER = [
       ['organisations'],
       ['people'],
+      ['tokens'],
       ['plants'],
       ['feed', 'samples'],
-      ['plans'],
+      ['plans', 'targets'],
       ['bench', 'trends', 'imports', 'today', 'demo'],
-      ['reports', 'mail'],
+      ['reports', 'public-api'],
     ];
     const rank = (file: string) =>
       ORDER.findIndex((names) => names.some((name) => inside(`lib/${name}`)(file)));
@@ -205,6 +212,7 @@ describe('the house', () => {
       'eslint.config.mjs',
       'vitest.config.ts',
       'proxy.ts',
+      'instrumentation.ts',
       'next-env.d.ts',
       'node_modules',
       'docs',

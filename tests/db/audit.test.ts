@@ -11,6 +11,7 @@ import { recordChange } from '@/lib/audit/record-change';
 import type { AuditChange } from '@/lib/audit/schema';
 import { enter, type Actor } from '@/lib/auth/door';
 import { inTenant } from '@/lib/auth/in-tenant';
+import { sessionOf } from '../support/session-of';
 import { insertSmallWorks, SMALL_WORKS } from '../support/small-works';
 import { createTestDatabase, type TestDatabase } from '../support/test-database';
 
@@ -24,7 +25,7 @@ beforeAll(async () => {
   admin = knex(ownerKnexConfig(database.adminUrl));
   await insertSmallWorks(admin);
   await insertSmallWorks(admin, '-2');
-  actor = await enter(SMALL_WORKS.personId, 'small', 'plan.write');
+  actor = await enter(sessionOf(SMALL_WORKS.personId), 'small', 'plan.write');
 });
 afterAll(async () => {
   await pool().destroy();
@@ -76,7 +77,7 @@ describe('the audit trail', () => {
     const { entries, total } = await readAudit(actor, { page: 1 });
     expect(total).toBe(entries.length);
     expect(entries[0]?.position).toBe(total);
-    const stranger = await enter(`${SMALL_WORKS.personId}-2`, 'small-2', 'plan.read');
+    const stranger = await enter(sessionOf(`${SMALL_WORKS.personId}-2`), 'small-2', 'plan.read');
     expect(await readAudit(stranger, { page: 1 })).toEqual({ entries: [], total: 0 });
   });
 

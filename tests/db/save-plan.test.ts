@@ -13,6 +13,7 @@ import { getPlant } from '@/lib/plants/read-plants';
 import { saveSample } from '@/lib/samples/save-sample';
 import { sampleInput } from '@/lib/samples/schema';
 import { solveSample } from '@/lib/samples/solve-sample';
+import { sessionOf } from '../support/session-of';
 import { insertSmallWorks, SMALL_WORKS } from '../support/small-works';
 import { createTestDatabase, type TestDatabase } from '../support/test-database';
 
@@ -26,7 +27,7 @@ beforeAll(async () => {
   process.env.DATABASE_URL = database.url;
   admin = knex(ownerKnexConfig(database.adminUrl));
   await insertSmallWorks(admin);
-  actor = await enter(SMALL_WORKS.personId, 'small', 'plan.write');
+  actor = await enter(sessionOf(SMALL_WORKS.personId), 'small', 'plan.write');
   ({ sampleId } = await saveSample(
     actor,
     sampleInput.parse({

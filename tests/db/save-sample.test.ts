@@ -7,6 +7,7 @@ import { getPlant } from '@/lib/plants/read-plants';
 import { getSample } from '@/lib/samples/get-sample';
 import { saveSample } from '@/lib/samples/save-sample';
 import { sampleInput, type SampleToKeep } from '@/lib/samples/schema';
+import { sessionOf } from '../support/session-of';
 import { insertSmallWorks, SMALL_WORKS } from '../support/small-works';
 import { createTestDatabase, type TestDatabase } from '../support/test-database';
 
@@ -20,7 +21,7 @@ beforeAll(async () => {
   admin = knex(ownerKnexConfig(database.adminUrl));
   await insertSmallWorks(admin);
   await insertSmallWorks(admin, '-2');
-  actor = await enter(SMALL_WORKS.personId, 'small', 'sample.write');
+  actor = await enter(sessionOf(SMALL_WORKS.personId), 'small', 'sample.write');
 });
 afterAll(async () => {
   await pool().destroy();
@@ -103,7 +104,7 @@ describe('saving a sample', () => {
 
   it('shows another organisation’s sample to nobody else', async () => {
     const { sampleId } = await saveSample(actor, sheet(), now);
-    const stranger = await enter(`${SMALL_WORKS.personId}-2`, 'small-2', 'sample.read');
+    const stranger = await enter(sessionOf(`${SMALL_WORKS.personId}-2`), 'small-2', 'sample.read');
     const theirs = await getPlant(stranger, 'spring');
     await expect(getSample(stranger, theirs, sampleId)).rejects.toThrow(/no such sample/);
   });
@@ -116,17 +117,23 @@ describe('the door', () => {
     [SMALL_WORKS.personId, 'small-2', 'notFound'],
     [SMALL_WORKS.personId, 'nowhere', 'notFound'],
   ])('stays shut for %s at %s: %s', async (person, organisation, code) => {
-    await expect(enter(person, organisation, 'plant.read')).rejects.toMatchObject({ code });
+    await expect(
+      enter(person === null ? null : sessionOf(person), organisation, 'plant.read'),
+    ).rejects.toMatchObject({ code });
   });
 
   it('refuses a consultant who would write a sample, at the very next request after the role changed', async () => {
     const membership = admin('memberships').where({ person_id: SMALL_WORKS.personId });
     await membership.clone().update({ role: 'consultant' });
-    await expect(enter(SMALL_WORKS.personId, 'small', 'sample.write')).rejects.toMatchObject({
+    await expect(
+      enter(sessionOf(SMALL_WORKS.personId), 'small', 'sample.write'),
+    ).rejects.toMatchObject({
       code: 'forbidden',
     });
     await membership.clone().update({ role: 'operator' });
-    await expect(enter(SMALL_WORKS.personId, 'small', 'sample.write')).resolves.toMatchObject({
+    await expect(
+      enter(sessionOf(SMALL_WORKS.personId), 'small', 'sample.write'),
+    ).resolves.toMatchObject({
       role: 'operator',
     });
   });

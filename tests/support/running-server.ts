@@ -1,5 +1,9 @@
 import type { TestProject } from 'vitest/node';
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { NEXT } from '@/docker-free-scripts/setup/build.mjs';
+import { openMail } from '@/docker-free-scripts/setup/mail.mjs';
 import { freePort } from '@/docker-free-scripts/setup/ports.mjs';
 import { prepareDatabase, type DemoSignIn } from '@/docker-free-scripts/setup/product-database.mjs';
 import { Supervisor } from '@/docker-free-scripts/setup/supervisor.mjs';
@@ -11,6 +15,7 @@ declare module 'vitest' {
     databaseUrl: string;
     adminUrl: string;
     signIns: DemoSignIn[];
+    outbox: string;
   }
 }
 
@@ -21,6 +26,8 @@ export default async function setup(project: TestProject): Promise<() => Promise
   const port = await freePort();
   const baseUrl = `http://127.0.0.1:${port}`;
   const supervisor = new Supervisor();
+  const outbox = mkdtempSync(join(tmpdir(), 'marlwick-outbox-'));
+  const mail = await openMail(supervisor, outbox, 'test-mail');
   await supervisor.start({
     name: 'test-web',
     command: process.execPath,
@@ -32,6 +39,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
       NEXTAUTH_URL: baseUrl,
       NEXTAUTH_SECRET: 'a-secret-for-tests-only-0123456789abcdef',
       DATABASE_URL: database.url,
+      ...mail,
     },
     healthUrl: `${baseUrl}/api/health`,
   });
@@ -39,8 +47,10 @@ export default async function setup(project: TestProject): Promise<() => Promise
   project.provide('databaseUrl', database.url);
   project.provide('adminUrl', database.adminUrl);
   project.provide('signIns', signIns);
+  project.provide('outbox', outbox);
   return async () => {
     await supervisor.stop();
     await database.drop();
+    rmSync(outbox, { recursive: true, force: true });
   };
 }

@@ -21,6 +21,7 @@ export async function insertSmallWorks(owner: Knex, suffix = ''): Promise<void> 
     email: `operator${suffix}@small.example`,
     name: 'Operator',
     password_hash: 'no password',
+    email_verified_at: owner.fn.now(),
   });
   await owner('memberships').insert({
     organisation_id,

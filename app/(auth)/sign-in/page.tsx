@@ -1,30 +1,41 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
 import { redirect } from 'next/navigation';
-import { Wordmark } from '@/components/shell/wordmark';
-import { signedInPersonId } from '@/lib/auth/actor';
+import { DoorSheet } from '@/components/shell/door-sheet';
+import { Notice } from '@/components/ui/notice';
+import { signedInPerson } from '@/lib/auth/actor';
+import { openIdName } from '@/lib/auth/open-id';
 import { paths } from '@/lib/paths';
+import { OpenIdButton } from './open-id-button';
 import { SignInForm } from './sign-in-form';
 
 export const metadata: Metadata = { title: 'Sign in' };
 
-export default async function SignInPage() {
-  if ((await signedInPersonId()) !== null) redirect(paths.home);
+export default async function SignInPage({
+  searchParams,
+}: {
+  searchParams: Promise<{ refused?: string; error?: string }>;
+}) {
+  if ((await signedInPerson()) !== null) redirect(paths.home);
+  const { refused, error } = await searchParams;
+  const openId = openIdName();
   return (
-    <main className="mx-auto grid min-h-dvh max-w-5xl content-center gap-x-16 gap-y-10 px-4 py-10 sm:px-8 md:grid-cols-2">
-      <div className="self-center">
-        <Wordmark large />
-        <p className="mt-5 max-w-prose font-head text-xl leading-snug">
-          From the morning&rsquo;s sample to a pump setting you can explain.
-        </p>
-        <p className="mt-3 max-w-prose text-ink-soft">
-          Marlwick suggests; the licensed operator in charge decides. Confirm every dose by jar test
-          or titration and at the tap, and stay within the permit and local codes.
-        </p>
-      </div>
-      <div className="margin-rule self-center pl-6 sm:pl-8">
-        <h1 className="text-2xl">Sign in</h1>
-        <SignInForm />
-      </div>
-    </main>
+    <DoorSheet title="Sign in">
+      {refused === undefined && error === undefined ? null : (
+        <div className="mt-4 max-w-sm">
+          <Notice tone="act" title="Not signed in">
+            {refused === 'unknown'
+              ? 'Nobody here is known by that account. Ask your organisation to invite the address it has confirmed.'
+              : 'That did not work. Try again, or sign in with your password.'}
+          </Notice>
+        </div>
+      )}
+      <SignInForm />
+      {openId === null ? null : <OpenIdButton name={openId} />}
+      <p className="mt-5 flex max-w-sm flex-wrap justify-between gap-x-6 gap-y-2">
+        <Link href={paths.forgotten}>Forgotten password</Link>
+        <Link href={paths.signUp}>Open an account</Link>
+      </p>
+    </DoorSheet>
   );
 }

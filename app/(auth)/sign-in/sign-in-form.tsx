@@ -1,65 +1,63 @@
 'use client';
 
-import { zodResolver } from '@hookform/resolvers/zod';
 import { signIn, type SignInResponse } from 'next-auth/react';
 import { useRouter } from 'next/navigation';
-import { useForm } from 'react-hook-form';
-import { TextField } from '@/components/forms/text-field';
-import { Button } from '@/components/ui/button';
-import { Notice } from '@/components/ui/notice';
+import { useState } from 'react';
+import { SimpleForm, type SimpleField, type Submitted } from '@/components/forms/simple-form';
+import { SECOND_FACTOR_NEEDED } from '@/lib/auth/sign-in-words';
 import { paths } from '@/lib/paths';
-import { signInInput, type SignInInput } from '@/lib/people/schema';
 
-/** E-mail and password. A wrong pair is one sentence that does not tell which of the two was wrong. */
+const FIELDS: readonly SimpleField[] = [
+  { name: 'email', label: 'E-mail', type: 'email', autoComplete: 'username' },
+  { name: 'password', label: 'Password', type: 'password', autoComplete: 'current-password' },
+];
+const CODE: SimpleField = {
+  name: 'code',
+  label: 'Code',
+  autoComplete: 'one-time-code',
+  hint: 'From your authenticator, or a recovery code',
+};
+
+/** E-mail, password, and a code where the account asks for one. A wrong pair does not tell which of the two was wrong. */
 export function SignInForm() {
   const router = useRouter();
-  const form = useForm<SignInInput>({
-    resolver: zodResolver(signInInput),
-    defaultValues: { email: '', password: '' },
-  });
-  const { errors, isSubmitting } = form.formState;
+  const [asksCode, setAsksCode] = useState(false);
 
-  const enter = form.handleSubmit(async (input) => {
-    const answer = await signIn('credentials', { ...input, redirect: false });
+  const enter = async (values: Readonly<Record<string, string>>): Promise<Submitted> => {
+    const missing = missingOf(values);
+    if (missing.length > 0) {
+      return { ok: false, message: 'Both are needed.', problems: missing };
+    }
+    const answer = await signIn('credentials', { ...values, redirect: false });
     if (answer?.ok === true && answer.error === null) {
       router.replace(paths.home);
       router.refresh();
-      return;
+      return { ok: true };
     }
-    form.setError('root', {
-      message: refusalWords(answer),
-    });
-  });
+    const message = refusalWords(answer);
+    if (message === SECOND_FACTOR_NEEDED) setAsksCode(true);
+    return { ok: false, message, problems: [] };
+  };
 
   return (
-    <form onSubmit={(event) => void enter(event)} noValidate className="mt-5 grid max-w-sm gap-5">
-      {errors.root?.message === undefined ? null : (
-        <Notice tone="act" title="Not signed in" role="alert">
-          {errors.root.message}
-        </Notice>
-      )}
-      <TextField
-        label="E-mail"
-        type="email"
-        autoComplete="username"
-        problem={errors.email?.message}
-        {...form.register('email')}
-      />
-      <TextField
-        label="Password"
-        type="password"
-        autoComplete="current-password"
-        problem={errors.password?.message}
-        {...form.register('password')}
-      />
-      <Button type="submit" shape="main" disabled={isSubmitting}>
-        {isSubmitting ? 'Signing in…' : 'Sign in'}
-      </Button>
-    </form>
+    <SimpleForm
+      fields={asksCode ? [...FIELDS, CODE] : FIELDS}
+      submit={enter}
+      label="Sign in"
+      busyLabel="Signing in…"
+      failure={asksCode ? 'One thing more' : 'Not signed in'}
+    />
   );
 }
 
-/** What next-auth answered, in words: its own for a wrong pair, the server's sentence for a closed address. */
+const missingOf = ({ email = '', password = '' }: Readonly<Record<string, string>>) => [
+  ...(/^\S+@\S+$/.test(email.trim())
+    ? []
+    : [{ path: 'email', message: 'Write the e-mail address you were invited with.' }]),
+  ...(password === '' ? [{ path: 'password', message: 'Write your password.' }] : []),
+];
+
+/** What next-auth answered, in words: its own for a wrong pair, the server's sentence for anything else. */
 function refusalWords(answer: SignInResponse | undefined): string {
   if (answer?.status !== 401) return 'Marlwick did not answer. Check the connection and try again.';
   return answer.error === null || answer.error === undefined || answer.error === 'CredentialsSignin'

@@ -1,9 +1,17 @@
 import type { ReactNode } from 'react';
-import { Masthead } from '@/components/shell/masthead';
+import { Masthead, type MastheadLink } from '@/components/shell/masthead';
 import { PlantTabs } from '@/components/shell/plant-tabs';
 import { pageActor } from '@/lib/auth/actor';
-import { roleMay } from '@/lib/auth/permissions';
+import { roleMay, type Permission } from '@/lib/auth/permissions';
+import { paths } from '@/lib/paths';
+import { readOrganisationsOf } from '@/lib/people/read-home-of';
 import { readPlants } from '@/lib/plants/read-plants';
+
+const LINKS: readonly { label: string; href: (org: string) => string; needs: Permission }[] = [
+  { label: 'People', href: paths.people, needs: 'member.read' },
+  { label: 'Tokens', href: paths.tokens, needs: 'token.read' },
+  { label: 'Audit', href: (org) => paths.audit(org), needs: 'audit.read' },
+];
 
 export default async function WorkspaceLayout({
   children,
@@ -15,6 +23,10 @@ export default async function WorkspaceLayout({
   const { org } = await params;
   const actor = await pageActor(org, 'plant.read');
   const plants = await readPlants(actor);
+  const organisations = await readOrganisationsOf(actor.personId);
+  const links: MastheadLink[] = LINKS.filter(({ needs }) => roleMay(actor.role, needs)).map(
+    ({ label, href }) => ({ label, href: href(org) }),
+  );
   return (
     <>
       <a
@@ -27,7 +39,8 @@ export default async function WorkspaceLayout({
         organisation={actor.organisation}
         personName={actor.personName}
         role={actor.role}
-        mayReadAudit={roleMay(actor.role, 'audit.read')}
+        others={organisations.filter(({ id }) => id !== actor.organisation.id)}
+        links={links}
       />
       <PlantTabs
         organisationSlug={actor.organisation.slug}

@@ -1,6 +1,9 @@
 import NextAuth from 'next-auth';
 import { authOptions } from '@/lib/auth/options';
 
-const handler = NextAuth(authOptions) as (request: Request, context: unknown) => Promise<Response>;
+type Handler = (request: Request, context: unknown) => Promise<Response>;
+
+const handler: Handler = (request, context) =>
+  (NextAuth(authOptions()) as Handler)(request, context);
 
 export { handler as GET, handler as POST };

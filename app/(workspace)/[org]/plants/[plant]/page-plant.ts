@@ -1,8 +1,7 @@
-import { notFound } from 'next/navigation';
+import { orNotFound } from '@/app/or-not-found';
 import { pageActor } from '@/lib/auth/actor';
 import type { Actor } from '@/lib/auth/door';
 import type { Permission } from '@/lib/auth/permissions';
-import { AppError } from '@/lib/errors';
 import { getPlant } from '@/lib/plants/read-plants';
 import type { Plant } from '@/lib/plants/schema';
 
@@ -14,14 +13,4 @@ export async function pagePlant(
   const { org, plant: slug } = await params;
   const actor = await pageActor(org, permission);
   return { actor, plant: await orNotFound(getPlant(actor, slug)) };
-}
-
-/** Turns a use case's "not found" into the page's. */
-export async function orNotFound<Value>(found: Promise<Value>): Promise<Value> {
-  try {
-    return await found;
-  } catch (error) {
-    if (error instanceof AppError && error.code === 'notFound') notFound();
-    throw error;
-  }
 }

@@ -11,7 +11,8 @@ import { paths } from '@/lib/paths';
 import { reworkPlan } from '@/lib/plans/frozen';
 import { doseWords, targetWords } from '@/lib/plans/plan-words';
 import { getPlan } from '@/lib/plans/read-plans';
-import { orNotFound, pagePlant } from '../../page-plant';
+import { orNotFound } from '@/app/or-not-found';
+import { pagePlant } from '../../page-plant';
 
 export const metadata: Metadata = { title: 'Plan' };
 

@@ -6,7 +6,8 @@ import { systemClock } from '@/lib/clock';
 import { formatDayTime } from '@/lib/format';
 import { paths } from '@/lib/paths';
 import { readPlanDesk } from '@/lib/plans/read-plan-desk';
-import { orNotFound, pagePlant } from '../../page-plant';
+import { orNotFound } from '@/app/or-not-found';
+import { pagePlant } from '../../page-plant';
 import { PlanDesk } from './plan-desk';
 
 export const metadata: Metadata = { title: 'Plan a dose' };

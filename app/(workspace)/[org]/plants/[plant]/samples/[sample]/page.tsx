@@ -13,7 +13,8 @@ import { getSample } from '@/lib/samples/get-sample';
 import { INDEX_KEYS } from '@/lib/samples/indices';
 import { measuredValues } from '@/lib/samples/measured-values';
 import { solveSample } from '@/lib/samples/solve-sample';
-import { orNotFound, pagePlant } from '../../page-plant';
+import { orNotFound } from '@/app/or-not-found';
+import { pagePlant } from '../../page-plant';
 import { MetalSolubility } from './metal-solubility';
 import { ResultTable } from './result-table';
 

@@ -1,7 +1,4 @@
-import { memberRoute } from '@/lib/api/member-route';
-import { readSeries } from '@/lib/trends/read-series';
-import { seriesQuery } from '@/lib/trends/schema';
+import { serve } from '@/lib/api/serve';
+import { readSeries } from '@/lib/public-api/series';
 
-export const GET = memberRoute('trend.read', seriesQuery, (actor, query, { plant = '' }) =>
-  readSeries(actor, plant, query),
-);
+export const GET = serve(readSeries);
