@@ -36,6 +36,7 @@ describe('signing in', () => {
       id: SMALL_WORKS.personId,
       name: 'Operator',
       email: EMAIL,
+      epoch: 0,
     });
   });
 
