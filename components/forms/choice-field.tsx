@@ -1,7 +1,7 @@
 'use client';
 
 import { useId } from 'react';
-import { inputClass } from './text-field';
+import { inputClass } from './input-class';
 
 /** One of a few, as the browser's own list. */
 export function ChoiceField<Value extends string>({

@@ -2,7 +2,7 @@
 
 import type { UseFormRegisterReturn } from 'react-hook-form';
 import { FieldProblem } from './field-problem';
-import { inputClass } from './text-field';
+import { inputClass } from './input-class';
 import { Formula } from '@/components/ui/formula';
 import { formatNumber } from '@/lib/format';
 import { checkResult, unusualRemark, type WrittenResult } from '@/lib/samples/check-result';

@@ -2,11 +2,7 @@
 
 import { useId, type InputHTMLAttributes, type ReactNode, type Ref } from 'react';
 import { FieldProblem } from './field-problem';
-
-export const inputClass = (hasProblem: boolean): string =>
-  `min-h-touch w-full border bg-chalk px-3 py-1.5 ${
-    hasProblem ? 'border-2 border-rust' : 'border-rule-strong'
-  }`;
+import { inputClass } from './input-class';
 
 /** One line of text with its label above and its problem, if any, below. */
 export function TextField({

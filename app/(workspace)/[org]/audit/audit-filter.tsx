@@ -1,4 +1,4 @@
-import { inputClass } from '@/components/forms/text-field';
+import { inputClass } from '@/components/forms/input-class';
 import { Button } from '@/components/ui/button';
 import { AUDIT_WORDS, type AuditQuery } from '@/lib/audit/schema';
 

@@ -2,7 +2,8 @@
 
 import { differenceInCalendarDays, parseISO } from 'date-fns';
 import { useId } from 'react';
-import { inputClass, TextField } from '@/components/forms/text-field';
+import { inputClass } from '@/components/forms/input-class';
+import { TextField } from '@/components/forms/text-field';
 import { Formula } from '@/components/ui/formula';
 import type { SeriesKey } from '@/lib/samples/describe';
 import { MOST_PANELS, SPANS, type TrendChoices } from '@/lib/trends/choices';
