@@ -55,7 +55,7 @@ export function Masthead({
           {personName}, {role}
         </Link>
         {links.map(({ label, href }) => (
-          <Link key={href} href={href} className={buttonClass('quiet')}>
+          <Link key={href} href={href} className={`${buttonClass('quiet')} max-sm:px-2`}>
             {label}
           </Link>
         ))}

@@ -88,7 +88,8 @@ export function TargetRow({
             <strong>{label}</strong> <Range target={target} unit={unit} />
           </p>
           <p className="text-sm text-ink-soft">
-            {target.basis === '' ? 'no basis written down' : target.basis}; version {target.version}
+            Version {target.version}.{' '}
+            {target.basis === '' ? 'No basis written down.' : target.basis}
           </p>
         </div>
         {mayChange ? (
@@ -169,19 +170,22 @@ function Range({ target: { lowest, highest, preferred }, unit }: { target: Targe
     <>
       {lowest === null ? null : (
         <>
-          from <Figure unit={highest === null ? unit : ''}>{lowest}</Figure>{' '}
+          from <Figure unit={highest === null ? unit : ''}>{signed(lowest)}</Figure>{' '}
         </>
       )}
       {highest === null ? null : (
         <>
-          {lowest === null ? 'up to' : 'to'} <Figure unit={unit}>{highest}</Figure>
+          {lowest === null ? 'up to' : 'to'} <Figure unit={unit}>{signed(highest)}</Figure>
         </>
       )}
       {preferred === null ? null : (
         <>
-          , best <Figure>{preferred}</Figure>
+          , best <Figure>{signed(preferred)}</Figure>
         </>
       )}
     </>
   );
 }
+
+/** As it was set, with a real minus. */
+const signed = (value: number): string => String(value).replace('-', '\u2212');

@@ -1,7 +1,8 @@
 'use client';
 
 import { useId } from 'react';
-import { TextField, inputClass } from '@/components/forms/text-field';
+import { inputClass } from '@/components/forms/input-class';
+import { TextField } from '@/components/forms/text-field';
 import { Formula } from '@/components/ui/formula';
 import { REAGENTS, type ReagentKey, type TargetQuantity } from '@/lib/engine';
 import { formatNumber } from '@/lib/format';
