@@ -1,3 +1,4 @@
+import { AppError } from '@/lib/errors';
 import { database, type Database } from './client';
 
 /**
@@ -28,11 +29,27 @@ export function inContext<T>(
   context: RowContext,
   work: (transaction: Database) => Promise<T>,
 ): Promise<T> {
-  return database().transaction(async (transaction) => {
-    await setContext(transaction, context);
-    return work(transaction);
-  });
+  return database()
+    .transaction(async (transaction) => {
+      await setContext(transaction, context);
+      return work(transaction);
+    })
+    .catch((error: unknown) => {
+      throw isUnkeepableText(error)
+        ? new AppError('badInput', UNKEEPABLE, { cause: error })
+        : error;
+    });
 }
+
+const UNKEEPABLE = 'This text holds a character that cannot be kept.';
+/** PostgreSQL's codes for text it cannot hold: a NUL, or half a surrogate pair in JSON. */
+const UNKEEPABLE_CODES = ['22021', '22P05'];
+
+const isUnkeepableText = (error: unknown): boolean =>
+  typeof error === 'object' &&
+  error !== null &&
+  'code' in error &&
+  UNKEEPABLE_CODES.includes(String(error.code));
 
 /** Sets the row context of a transaction that is already open (seeds and tests bring their own connection). */
 export async function setContext(transaction: Database, context: RowContext): Promise<void> {

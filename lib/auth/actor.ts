@@ -38,7 +38,7 @@ export async function pageActor(organisationSlug: string, permission: Permission
     return await actorFor(organisationSlug, permission);
   } catch (error) {
     if (error instanceof AppError && error.code === 'signedOut') redirect(paths.signIn);
-    if (error instanceof AppError && error.code === 'notFound') nextNotFound();
+    if (error instanceof AppError && ['notFound', 'badInput'].includes(error.code)) nextNotFound();
     // A page that a role may not open is not there for it; its links are not shown either.
     if (error instanceof AppError && error.code === 'forbidden') nextNotFound();
     throw error;

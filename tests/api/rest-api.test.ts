@@ -113,7 +113,7 @@ describe('reading', () => {
     ['another point', `${PLANT}/samples?point=moon`, 404],
     ['another plant', '/calverdine/plants/moon', 404],
     ['another sample', `${PLANT}/samples/smp_00`, 404],
-    ['a NUL in a name', `${PLANT}/samples/%00`, 404],
+    ['a NUL in a name', `${PLANT}/samples/%00`, 422],
   ])('refuses %s', async (_what, path, status) => {
     const { status: answered, body } = await api(path);
     expect(answered).toBe(status);

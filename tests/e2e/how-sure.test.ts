@@ -23,8 +23,8 @@ describe('how sure a sample is', () => {
     // Frames are counted meanwhile: a page that waited for the engine would paint none.
     await page.evaluate(() => {
       const count = (): void => {
-        const holder = window as unknown as { frames?: number };
-        holder.frames = (holder.frames ?? 0) + 1;
+        const holder = window as unknown as { framesPainted?: number };
+        holder.framesPainted = (holder.framesPainted ?? 0) + 1;
         requestAnimationFrame(count);
       };
       requestAnimationFrame(count);
@@ -32,7 +32,7 @@ describe('how sure a sample is', () => {
     await page.getByRole('button', { name: 'Draw the band' }).click();
     await page.getByText('In nine of ten draws').waitFor();
     const frames = await page.evaluate(
-      () => (window as unknown as { frames?: number }).frames ?? 0,
+      () => (window as unknown as { framesPainted?: number }).framesPainted ?? 0,
     );
     expect(frames).toBeGreaterThan(2);
     const row = page.getByRole('row', { name: /^Calcite saturation index/ });
