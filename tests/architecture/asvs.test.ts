@@ -72,11 +72,10 @@ describe('docs/asvs.md', () => {
 
   it('calls nothing met without a test, a file or a section that shows it', () => {
     const unshown = rows.filter(
-      ({ id, status, shownBy }) =>
+      ({ status, shownBy }) =>
         status === 'met' &&
         !/\(#[a-z-]+\)/.test(shownBy) &&
-        !pathsIn(shownBy).some(existsSync) &&
-        id,
+        !pathsIn(shownBy).some((path) => existsSync(path)),
     );
     expect(unshown.map(({ id, shownBy }) => `${id}: ${shownBy}`)).toEqual([]);
   });
