@@ -11,5 +11,6 @@ const ownerUrl = process.env.DATABASE_OWNER_URL ?? appUrl;
 for (const name of await migrateToLatest(ownerUrl, appUrl)) {
   process.stderr.write(`migrated ${name}\n`);
 }
-const demoSignIns = await seedDemoOnce(ownerUrl);
+// A deployment of one's own has no use for accounts whose passwords stand in the README.
+const demoSignIns = process.env.MARLWICK_DEMO === 'off' ? [] : await seedDemoOnce(ownerUrl);
 process.stdout.write(`${JSON.stringify({ demoSignIns })}\n`);

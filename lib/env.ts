@@ -37,7 +37,18 @@ const environment = z
         if (settings[name] === undefined) issue(name, 'is needed beside OIDC_ISSUER');
       }
     }
+    const address = new URL(settings.NEXTAUTH_URL);
+    const isLoopback = ['127.0.0.1', 'localhost', '[::1]'].includes(address.hostname);
+    if (settings.MARLWICK_OUTBOX !== undefined && !isLoopback) {
+      issue(
+        'MARLWICK_OUTBOX',
+        'shows every letter to anyone: set SMTP_URL where others reach Marlwick',
+      );
+    }
     if (settings.NODE_ENV !== 'production') return;
+    if (address.protocol !== 'https:' && !isLoopback) {
+      issue('NEXTAUTH_URL', 'must begin with https:// where others reach Marlwick');
+    }
     if (settings.NEXTAUTH_SECRET === undefined) issue('NEXTAUTH_SECRET', 'is needed in production');
     const password = new URL(settings.DATABASE_URL).password;
     if (/^(postgres|password|marlwick|change[-_]?me|admin|secret)?$/i.test(password)) {

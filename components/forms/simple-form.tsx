@@ -24,7 +24,7 @@ export type Submitted =
 
 /**
  * A few lines of text and a button. The server checks; what it says stands at the field it is about, what was typed stays.
- * Focus moves to the first field with a problem, or to the sentence above.
+ * Sent before its script runs, it goes as a POST: a password never stands in an address. Focus moves to the first field with a problem, or to the sentence above.
  */
 export function SimpleForm({
   fields,
@@ -67,7 +67,7 @@ export function SimpleForm({
   };
 
   return (
-    <form ref={form} onSubmit={send} noValidate className="mt-5 grid max-w-sm gap-5">
+    <form ref={form} method="post" onSubmit={send} noValidate className="mt-5 grid max-w-sm gap-5">
       {problem === undefined ? null : (
         <div role="alert" tabIndex={-1}>
           <Notice tone="act" title={failure}>

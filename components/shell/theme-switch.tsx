@@ -16,7 +16,7 @@ export function ThemeSwitch() {
   const turn = () => {
     const next: Theme = shownTheme() === 'night' ? 'day' : 'night';
     document.documentElement.dataset.theme = next;
-    document.cookie = `${THEME_COOKIE}=${next}; path=/; max-age=${ONE_YEAR_S}; samesite=lax`;
+    document.cookie = `${THEME_COOKIE}=${next}; path=/; max-age=${ONE_YEAR_S}; samesite=lax${location.protocol === 'https:' ? '; secure' : ''}`;
   };
   return (
     <button type="button" onClick={turn} className={buttonClass('quiet')}>

@@ -25,14 +25,12 @@ const TENANT_TABLES = [
   'membership_plants',
   'feed_log',
 ];
-const PERSON_TABLES = ['one_time_tokens', 'recovery_codes', 'external_identities'];
+const PERSON_TABLES = ['one_time_tokens', 'recovery_codes', 'external_identities', 'sessions'];
 
 export async function up(knex: Knex): Promise<void> {
   await knex.raw(`
     alter table people
       add column email_verified_at timestamptz,
-      -- Every session names the number it was made under; raising it ends them all.
-      add column session_epoch integer not null default 0,
       -- Encrypted; in force once confirmed with a first code.
       add column totp_secret text,
       add column totp_confirmed_at timestamptz,
@@ -60,6 +58,18 @@ export async function up(knex: Knex): Promise<void> {
       primary key (organisation_id, person_id, plant_id),
       foreign key (organisation_id, person_id) references memberships on delete cascade
     );
+
+    -- A browser's session: its cookie holds the secret, this table the hash. Ended, it opens nothing any more.
+    create table sessions (
+      session_hash text primary key check (length(session_hash) = 64),
+      person_id text not null references people on delete cascade,
+      started_at timestamptz not null,
+      last_seen_at timestamptz not null,
+      ended_at timestamptz,
+      -- As the browser names itself, to tell one's sessions apart.
+      browser text not null default ''
+    );
+    create index sessions_person on sessions (person_id) where ended_at is null;
 
     create table one_time_tokens (
       token_hash text primary key check (length(token_hash) = 64),
@@ -174,6 +184,7 @@ export async function up(knex: Knex): Promise<void> {
     create policy own on membership_plants for select using (person_id = ${PERSON});
     -- Whoever brings the secret may read the one row it opens.
     create policy by_token on one_time_tokens for select using (token_hash = ${TOKEN});
+    create policy by_token on sessions for select using (session_hash = ${TOKEN});
     create policy by_token on invitations for select using (token_hash = ${TOKEN});
     create policy by_token on api_tokens for select using (token_hash = ${TOKEN});
     create policy by_token on external_identities for select using (identity_hash = ${TOKEN});
@@ -193,7 +204,7 @@ export async function down(knex: Knex): Promise<void> {
     await knex.raw('drop policy named_plants on ??', [table]);
   }
   await knex.raw(`
-    drop table feed_log, idempotency_keys, api_tokens, invitations, external_identities, recovery_codes,
+    drop table sessions, feed_log, idempotency_keys, api_tokens, invitations, external_identities, recovery_codes,
       one_time_tokens, membership_plants;
     alter table targets drop column version, drop column changed_at;
     drop policy own on organisations;
@@ -207,7 +218,7 @@ export async function down(knex: Knex): Promise<void> {
     delete from people where password_hash is null;
     alter table people force row level security;
     alter table people alter column password_hash set not null;
-    alter table people drop column email_verified_at, drop column session_epoch, drop column totp_secret,
+    alter table people drop column email_verified_at, drop column totp_secret,
       drop column totp_confirmed_at, drop column totp_last_step;
   `);
 }

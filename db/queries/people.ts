@@ -9,7 +9,6 @@ export interface AccountPerson {
   email: string;
   passwordHash: string | null;
   emailVerifiedAt: Date | null;
-  sessionEpoch: number;
   /** Encrypted; in force once confirmed. */
   totpSecret: string | null;
   totpConfirmedAt: Date | null;
@@ -22,7 +21,6 @@ const toPerson = (row: PersonRow): AccountPerson => ({
   email: row.email,
   passwordHash: row.password_hash,
   emailVerifiedAt: row.email_verified_at,
-  sessionEpoch: row.session_epoch,
   totpSecret: row.totp_secret,
   totpConfirmedAt: row.totp_confirmed_at,
   totpLastStep: row.totp_last_step,
@@ -87,16 +85,6 @@ export async function updatePerson(
     });
 }
 
-/** Ends every session of a person; returns the number new sessions are made under. */
-export async function raiseSessionEpoch(db: Database, personId: string): Promise<number> {
-  const [row] = await db<PersonRow>('people')
-    .where({ id: personId })
-    .update({ session_epoch: db.raw('session_epoch + 1') })
-    .returning<{ session_epoch: number }[]>('session_epoch');
-  if (row === undefined) throw new Error('The person vanished.');
-  return row.session_epoch;
-}
-
 /** Marks a time step's code as taken; false when it, or a later one, was taken before. */
 export async function takeTotpStep(db: Database, personId: string, step: number): Promise<boolean> {
   const changed = await db<PersonRow>('people')
@@ -113,7 +101,6 @@ export interface Membership {
   organisation: Organisation;
   /** Null: all plants of the organisation. */
   plantIds: string[] | null;
-  sessionEpoch: number;
 }
 
 type MembershipJoin = Pick<MembershipRow, 'role' | 'person_id' | 'all_plants'> &
@@ -121,7 +108,6 @@ type MembershipJoin = Pick<MembershipRow, 'role' | 'person_id' | 'all_plants'> &
     organisation_id: string;
     organisation_name: string;
     person_name: string;
-    session_epoch: number;
   };
 
 const memberships = (db: Database, personId: string) =>
@@ -139,7 +125,6 @@ const memberships = (db: Database, personId: string) =>
       'organisations.is_demo',
       'organisations.name as organisation_name',
       'people.name as person_name',
-      'people.session_epoch',
     );
 
 const toMembership = (row: MembershipJoin, plantIds: string[] | null): Membership => ({
@@ -153,7 +138,6 @@ const toMembership = (row: MembershipJoin, plantIds: string[] | null): Membershi
     isDemo: row.is_demo,
   },
   plantIds,
-  sessionEpoch: row.session_epoch,
 });
 
 /** The person's membership of the organisation with this slug, if there is one. */

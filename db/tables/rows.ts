@@ -15,7 +15,6 @@ export interface PersonRow {
   password_hash: string | null;
   created_at: Date;
   email_verified_at: Date | null;
-  session_epoch: number;
   totp_secret: string | null;
   totp_confirmed_at: Date | null;
   totp_last_step: number;
@@ -34,6 +33,15 @@ export interface MembershipPlantRow {
   organisation_id: string;
   person_id: string;
   plant_id: string;
+}
+
+export interface SessionRow {
+  session_hash: string;
+  person_id: string;
+  started_at: Date;
+  last_seen_at: Date;
+  ended_at: Date | null;
+  browser: string;
 }
 
 export interface OneTimeTokenRow {

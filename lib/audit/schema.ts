@@ -42,6 +42,7 @@ export const auditChange = z.discriminatedUnion('action', [
     after: z.object({ role, plantIds: plants }),
   }),
   change('member.removed', { role }),
+  change('member.signed-out', { role }),
   change('token.made', {
     name: z.string(),
     prefix: z.string(),
@@ -65,6 +66,7 @@ export const AUDIT_WORDS: Readonly<Record<AuditAction, string>> = {
   'member.joined': 'Person joined',
   'member.changed': 'Role or plants changed',
   'member.removed': 'Person removed',
+  'member.signed-out': 'Person signed out everywhere',
   'token.made': 'API token made',
   'token.revoked': 'API token revoked',
 };

@@ -12,8 +12,7 @@ import { findSignedIn, type SignedInPerson } from './signed-in';
 /** What this request's cookie says, unchecked. Read once per request. */
 export const sessionCredential = cache(async (): Promise<Credential> => {
   const session = await getServerSession(authOptions());
-  if (session === null || session.personId === '') return null;
-  return { kind: 'session', personId: session.personId, epoch: session.epoch };
+  return session?.secret ? { kind: 'session', secret: session.secret } : null;
 });
 
 /** The signed-in person, checked against the database: null when signed out, or signed out everywhere since. */

@@ -15,7 +15,6 @@ export interface SignedIn {
   readonly id: string;
   readonly name: string;
   readonly email: string;
-  readonly epoch: number;
 }
 
 /**
@@ -48,7 +47,7 @@ export async function checkSignIn(
   }
   await requireSecondFactor(person, email, code, clock);
   await forgetTriesOf('sign-in', email);
-  return { id: person.id, name: person.name, email: person.email, epoch: person.sessionEpoch };
+  return { id: person.id, name: person.name, email: person.email };
 }
 
 async function requireSecondFactor(

@@ -1,13 +1,15 @@
 import { findMembership, type Membership } from '@/db/queries/people';
 import { inContext } from '@/db/tenant';
 import { AppError, notFound } from '@/lib/errors';
+import { logger } from '@/lib/logger';
 import type { Organisation } from '@/lib/organisations/schema';
 import type { ApiTokenHolder } from './api-token';
 import { roleMay, type Permission, type Role } from './permissions';
+import { withSession } from './sessions';
 
 /** What someone brings to the door: a browser's session, an API token, or nothing. */
 export type Credential =
-  | { readonly kind: 'session'; readonly personId: string; readonly epoch: number }
+  | { readonly kind: 'session'; readonly secret: string }
   | ({ readonly kind: 'token' } & ApiTokenHolder)
   | null;
 
@@ -34,31 +36,46 @@ export async function enter(
   permission: Permission,
 ): Promise<Actor> {
   if (credential === null) throw new AppError('signedOut', 'Sign in to go on.');
-  const personId = credential.kind === 'session' ? credential.personId : credential.madeBy;
-  const membership = await inContext({ personId }, (db) =>
-    findMembership(db, personId, organisationSlug),
-  );
-  if (credential.kind === 'session') return throughSession(credential, membership, permission);
-  return throughToken(credential, membership, permission);
+  try {
+    return credential.kind === 'session'
+      ? await throughSession(credential.secret, organisationSlug, permission)
+      : await throughToken(credential, organisationSlug, permission);
+  } catch (error) {
+    if (error instanceof AppError) {
+      const by = credential.kind === 'token' ? { tokenId: credential.tokenId } : {};
+      logger.warn(
+        { event: 'door-shut', why: error.code, permission, ...by },
+        'the door stayed shut',
+      );
+    }
+    throw error;
+  }
 }
 
-function throughSession(
-  { epoch }: { readonly epoch: number },
-  membership: Membership | undefined,
+async function throughSession(
+  secret: string,
+  organisationSlug: string,
   permission: Permission,
-): Actor {
-  if (membership === undefined) throw notFound('organisation');
-  if (membership.sessionEpoch !== epoch) {
-    throw new AppError('signedOut', 'You were signed out everywhere. Sign in to go on.');
-  }
+): Promise<Actor> {
+  const found = await withSession(secret, async (db, { personId }) => ({
+    membership: await findMembership(db, personId, organisationSlug),
+  }));
+  if (found === undefined)
+    throw new AppError('signedOut', 'Your session has ended. Sign in to go on.');
+  if (found.membership === undefined) throw notFound('organisation');
+  const { membership } = found;
   return checked(membership, permission, { plantIds: membership.plantIds, token: null });
 }
 
-function throughToken(
+async function throughToken(
   token: ApiTokenHolder,
-  membership: Membership | undefined,
+  organisationSlug: string,
   permission: Permission,
-): Actor {
+): Promise<Actor> {
+  const personId = token.madeBy;
+  const membership = await inContext({ personId }, (db) =>
+    findMembership(db, personId, organisationSlug),
+  );
   if (membership === undefined || membership.organisation.id !== token.organisationId) {
     throw notFound('organisation');
   }

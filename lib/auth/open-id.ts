@@ -18,7 +18,6 @@ interface SignedInUser {
   readonly id: string;
   readonly name: string;
   readonly email: string;
-  readonly epoch: number;
 }
 
 /** What people call the provider, or null when none is set. */
@@ -45,7 +44,7 @@ export function openIdProvider(): {
       checks: ['pkce', 'state', 'nonce'],
       idToken: true,
       // Replaced by the person of this product in the sign-in callback.
-      profile: ({ sub = '', name = '', email = '' }) => ({ id: sub, name, email, epoch: -1 }),
+      profile: ({ sub = '', name = '', email = '' }) => ({ id: sub, name, email }),
     },
     personOf: (profile) => personOf(OIDC_ISSUER, profile as Claims | undefined),
   };
@@ -66,7 +65,7 @@ export async function personOf(
   );
   if (linked !== undefined) {
     const person = await inContext({ personId: linked }, (db) => findPersonById(db, linked));
-    return person === undefined ? null : { ...person, epoch: person.sessionEpoch };
+    return person === undefined ? null : { id: person.id, name: person.name, email: person.email };
   }
   const email = claims.email_verified === true ? claims.email?.trim().toLowerCase() : undefined;
   if (email === undefined) return null;
@@ -77,5 +76,5 @@ export async function personOf(
     linkIdentity(db, { identityHash, personId: person.id, provider: issuer }),
   );
   logger.info({ event: 'identity-linked', personId: person.id }, 'a provider identity was linked');
-  return { id: person.id, name: person.name, email: person.email, epoch: person.sessionEpoch };
+  return { id: person.id, name: person.name, email: person.email };
 }

@@ -1,13 +1,16 @@
 import { findPersonById, type AccountPerson } from '@/db/queries/people';
-import { inContext } from '@/db/tenant';
 import type { Credential } from './door';
+import { withSession } from './sessions';
 
-export type SignedInPerson = AccountPerson;
+/** A person with the session they came by. */
+export type SignedInPerson = AccountPerson & { readonly sessionHash: string };
 
-/** The person of a session, unless their sessions were ended since it began. */
+/** The person of a session in force; null for anyone else. */
 export async function findSignedIn(credential: Credential): Promise<SignedInPerson | null> {
   if (credential?.kind !== 'session') return null;
-  const { personId, epoch } = credential;
-  const person = await inContext({ personId }, (db) => findPersonById(db, personId));
-  return person === undefined || person.sessionEpoch !== epoch ? null : person;
+  const found = await withSession(credential.secret, async (db, { personId, sessionHash }) => {
+    const person = await findPersonById(db, personId);
+    return person && { ...person, sessionHash };
+  });
+  return found ?? null;
 }

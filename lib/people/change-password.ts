@@ -1,20 +1,22 @@
-import { raiseSessionEpoch, updatePerson, type AccountPerson } from '@/db/queries/people';
+import { updatePerson, type AccountPerson } from '@/db/queries/people';
+import { endSessions } from '@/db/queries/sessions';
 import { inContext } from '@/db/tenant';
+import { systemClock } from '@/lib/clock';
 import { hashPassword } from '@/lib/auth/passwords';
 import { sendPasswordChanged } from '@/lib/mail/account-letters';
-import { requirePassword } from './require-password';
+import { requireProof, type Proof } from './require-proof';
 
 /** Changes one's own password; every session ends, this one too. */
 export async function changePassword(
   person: AccountPerson,
-  present: string,
+  present: Proof,
   next: string,
 ): Promise<void> {
-  await requirePassword(person, present);
+  await requireProof(person, present);
   const passwordHash = await hashPassword(next);
   await inContext({ personId: person.id }, async (db) => {
     await updatePerson(db, person.id, { passwordHash });
-    await raiseSessionEpoch(db, person.id);
+    await endSessions(db, person.id, systemClock());
   });
   await sendPasswordChanged(person.email, person.name);
 }

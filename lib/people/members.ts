@@ -7,6 +7,7 @@ import {
   type Member,
 } from '@/db/queries/members';
 import { listOpenInvitations, type KeptInvitation } from '@/db/queries/invitations';
+import { endAllSessions } from '@/lib/auth/sessions';
 import { recordChange } from '@/lib/audit/record-change';
 import type { Actor } from '@/lib/auth/door';
 import { inTenant } from '@/lib/auth/in-tenant';
@@ -76,6 +77,26 @@ export async function removeMember(
       clock,
     );
   });
+}
+
+/** Ends every session of a member, here and wherever else they belong: for a lost tablet or a stolen password. */
+export async function signOutMember(
+  actor: Actor,
+  personId: string,
+  clock: Clock = systemClock,
+): Promise<void> {
+  await inTenant(actor, async (db) => {
+    const owners = await lockOwners(db, actor.organisation.id);
+    const { role } = await memberOrThrow(db, actor, personId);
+    guardOwners(actor, owners, personId, role, role);
+    await recordChange(
+      db,
+      actor,
+      { action: 'member.signed-out', subjectId: personId, detail: { role } },
+      clock,
+    );
+  });
+  await endAllSessions(personId, clock);
 }
 
 async function memberOrThrow(

@@ -66,8 +66,14 @@ export const acceptInvitationInput = z.object({
   account: z.object({ name: personName, password: newPassword }).nullable(),
 });
 
-export const changePasswordInput = z.object({ present: presentPassword, next: newPassword });
-export const passwordInput = z.object({ password: presentPassword });
+const code = z.string().trim().max(40).default('');
+export const changePasswordInput = z.object({
+  password: presentPassword,
+  code,
+  next: newPassword,
+});
+export const proofInput = z.object({ password: presentPassword, code });
+export const sessionInput = z.object({ sessionHash: z.string().length(64) });
 export const codeInput = z.object({
   code: z.string().trim().min(6, 'Write the six figures.').max(40),
 });

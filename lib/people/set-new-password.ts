@@ -1,4 +1,5 @@
-import { findPersonById, raiseSessionEpoch, updatePerson } from '@/db/queries/people';
+import { findPersonById, updatePerson } from '@/db/queries/people';
+import { endSessions } from '@/db/queries/sessions';
 import { forgetTriesOf } from '@/lib/auth/limits';
 import { hashPassword } from '@/lib/auth/passwords';
 import { systemClock, type Clock } from '@/lib/clock';
@@ -18,7 +19,7 @@ export async function setNewPassword(
       passwordHash,
       ...(found?.emailVerifiedAt === null ? { emailVerifiedAt: clock() } : {}),
     });
-    await raiseSessionEpoch(db, personId);
+    await endSessions(db, personId, clock());
     return found;
   });
   if (person === undefined) return;

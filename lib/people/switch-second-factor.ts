@@ -4,7 +4,7 @@ import { confirmSecondFactor, endSecondFactor } from '@/lib/auth/second-factor';
 import { systemClock, type Clock } from '@/lib/clock';
 import { AppError } from '@/lib/errors';
 import { sendSecondFactorChanged } from '@/lib/mail/account-letters';
-import { requirePassword } from './require-password';
+import { requireProof, type Proof } from './require-proof';
 
 /** Puts the second factor in force with its first code; returns the recovery codes, shown this once. */
 export async function turnOnSecondFactor(
@@ -25,9 +25,13 @@ export async function turnOnSecondFactor(
   }
 }
 
-/** Turns it off for who knows the password; says so by letter. */
-export async function turnOffSecondFactor(person: AccountPerson, password: string): Promise<void> {
-  await requirePassword(person, password);
+/** Turns it off for who proves to be there; says so by letter. */
+export async function turnOffSecondFactor(
+  person: AccountPerson,
+  proof: Proof,
+  clock: Clock = systemClock,
+): Promise<void> {
+  await requireProof(person, proof, clock);
   await endSecondFactor(person);
   await sendSecondFactorChanged(person.email, person.name, false);
 }

@@ -25,7 +25,7 @@ async function marksOf(organisationId: string): Promise<Set<string>> {
       admin(table).where({ organisation_id: organisationId }).limit(400).pluck('id'),
     ),
   );
-  return new Set(ids.flat() as string[]);
+  return new Set((ids as string[][]).flat());
 }
 
 describe('one organisation at another’s door', () => {

@@ -4,12 +4,12 @@ import { database as pool } from '@/db/client';
 import { ownerKnexConfig } from '@/db/knex-config';
 import { checkSignIn } from '@/lib/auth/check-sign-in';
 import { enter, type Actor } from '@/lib/auth/door';
+import { endAllSessions, endSession, readSessions, withSession } from '@/lib/auth/sessions';
 import { findSignedIn } from '@/lib/auth/signed-in';
 import { acceptInvitation, readInvitation } from '@/lib/people/accept-invitation';
 import { askNewPassword } from '@/lib/people/ask-new-password';
 import { changePassword } from '@/lib/people/change-password';
 import { confirmAddress } from '@/lib/people/confirm-address';
-import { endAllSessions } from '@/lib/people/end-all-sessions';
 import { invite, revokeInvitation } from '@/lib/people/invite';
 import { changeMember, readPeople, removeMember } from '@/lib/people/members';
 import { setNewPassword } from '@/lib/people/set-new-password';
@@ -61,7 +61,11 @@ async function owner(
   await confirmAddress(secretIn(await letterTo(mail.folder, email, /Confirm/)));
   const person = await signInWith(email);
   const slug = organisationName.toLowerCase().replaceAll(' ', '-');
-  return { email, slug, actor: await enter(sessionOf(person?.id ?? ''), slug, 'member.write') };
+  return {
+    email,
+    slug,
+    actor: await enter(await sessionOf(person?.id ?? ''), slug, 'member.write'),
+  };
 }
 
 async function joined(actor: Actor, role: 'operator' | 'consultant' | 'manager' | 'owner') {
@@ -81,7 +85,7 @@ describe('signing up', () => {
     await expect(signInWith(email)).rejects.toMatchObject({ code: 'forbidden' });
     await confirmAddress(secretIn(await letterTo(mail.folder, email, /Confirm/)));
     const person = await signInWith(email);
-    const actor = await enter(sessionOf(person?.id ?? ''), 'barental-water', 'audit.read');
+    const actor = await enter(await sessionOf(person?.id ?? ''), 'barental-water', 'audit.read');
     expect(actor).toMatchObject({ role: 'owner', plantIds: null });
     const trail = await admin('audit_entries').where({ organisation_id: actor.organisation.id });
     expect(trail.map(({ action }: { action: string }) => action)).toEqual(['organisation.made']);
@@ -129,7 +133,7 @@ describe('a forgotten password', () => {
   it('is replaced once by the letter’s link, ends every session and opens with the new one only', async () => {
     const { email, slug } = await owner('Forgetful Water');
     const before = await signInWith(email);
-    const session = sessionOf(before?.id ?? '', before?.epoch);
+    const session = await sessionOf(before?.id ?? '');
     expect(await findSignedIn(session)).not.toBeNull();
     await askNewPassword(email);
     const secret = secretIn(await letterTo(mail.folder, email, /new password/i));
@@ -139,11 +143,10 @@ describe('a forgotten password', () => {
     });
     expect(await signInWith(email)).toBeNull();
     const after = await signInWith(email, 'four slow barges pass');
-    expect(after?.epoch).toBe(1);
     expect(await findSignedIn(session)).toBeNull();
     await expect(enter(session, slug, 'plant.read')).rejects.toMatchObject({ code: 'signedOut' });
     await expect(
-      enter(sessionOf(after?.id ?? '', after?.epoch), slug, 'plant.read'),
+      enter(await sessionOf(after?.id ?? ''), slug, 'plant.read'),
     ).resolves.toBeDefined();
   });
 
@@ -190,24 +193,47 @@ describe('an account', () => {
   it('changes its password only for who knows the present one; every session ends', async () => {
     const { email } = await owner('Careful Water');
     const signedIn = await signInWith(email);
-    const session = sessionOf(signedIn?.id ?? '', signedIn?.epoch);
+    const session = await sessionOf(signedIn?.id ?? '');
     const person = await findSignedIn(session);
     if (person === null) throw new Error('Not signed in.');
     await expect(
-      changePassword(person, 'not it at all', 'seven slow barges'),
+      changePassword(person, { password: 'not it at all', code: '' }, 'seven slow barges'),
     ).rejects.toMatchObject({
       code: 'badInput',
     });
     expect(await findSignedIn(session)).not.toBeNull();
-    await changePassword(person, PASSWORD, 'seven slow barges');
+    await changePassword(person, { password: PASSWORD, code: '' }, 'seven slow barges');
     expect(await findSignedIn(session)).toBeNull();
     expect(await signInWith(email, 'seven slow barges')).not.toBeNull();
+  });
+
+  it('signs out one browser and no other; each has a session of its own', async () => {
+    const { actor } = await owner('Twofold Water');
+    const first = await sessionOf(actor.personId);
+    const second = await sessionOf(actor.personId);
+    if (first?.kind !== 'session' || second?.kind !== 'session') throw new Error('No sessions.');
+    await endSession(first.secret);
+    expect(await findSignedIn(first)).toBeNull();
+    expect(await findSignedIn(second)).not.toBeNull();
+    expect((await readSessions(actor.personId)).length).toBeGreaterThan(0);
+  });
+
+  it('has sessions of twelve hours at most, and of four without a click', async () => {
+    const { actor } = await owner('Sleepy Water');
+    const session = await sessionOf(actor.personId);
+    if (session?.kind !== 'session') throw new Error('No session.');
+    const alive = (hours: number) =>
+      withSession(session.secret, () => Promise.resolve(true), later(hours * HOUR_MS));
+    expect(await alive(3.9)).toBe(true);
+    expect(await alive(8.1)).toBeUndefined();
+    for (const hours of [3.9, 7.7, 11.5, 11.9]) expect(await alive(hours)).toBe(true);
+    expect(await alive(12.1)).toBeUndefined();
   });
 
   it('signs out everywhere', async () => {
     const { email } = await owner('Absent Water');
     const signedIn = await signInWith(email);
-    const session = sessionOf(signedIn?.id ?? '', signedIn?.epoch);
+    const session = await sessionOf(signedIn?.id ?? '');
     await endAllSessions(signedIn?.id ?? '');
     expect(await findSignedIn(session)).toBeNull();
   });
@@ -239,10 +265,10 @@ describe('an invitation', () => {
     ).rejects.toMatchObject({ code: 'forbidden' });
     const id = second.actor.personId;
     await acceptInvitation({ id }, { secret, account: null });
-    await expect(enter(sessionOf(id), first.slug, 'plant.read')).resolves.toMatchObject({
+    await expect(enter(await sessionOf(id), first.slug, 'plant.read')).resolves.toMatchObject({
       role: 'consultant',
     });
-    await expect(enter(sessionOf(id), second.slug, 'plant.read')).resolves.toMatchObject({
+    await expect(enter(await sessionOf(id), second.slug, 'plant.read')).resolves.toMatchObject({
       role: 'owner',
     });
   });
@@ -279,7 +305,7 @@ describe('an invitation', () => {
   it('cannot be put on an owner by a manager, nor name plants of others', async () => {
     const { actor, slug } = await owner('Proper Water');
     const manager = await joined(actor, 'manager');
-    const asManager = await enter(sessionOf(manager.id), slug, 'member.write');
+    const asManager = await enter(await sessionOf(manager.id), slug, 'member.write');
     await expect(
       invite(asManager, { email: fresh(), role: 'owner', plantIds: null }),
     ).rejects.toMatchObject({ code: 'forbidden' });
@@ -303,7 +329,7 @@ describe('a member', () => {
   it('has another role, or none, at the very next request', async () => {
     const { actor, slug } = await owner('Changing Water');
     const person = await joined(actor, 'manager');
-    const session = sessionOf(person.id);
+    const session = await sessionOf(person.id);
     await expect(enter(session, slug, 'audit.read')).resolves.toBeDefined();
     await changeMember(actor, { personId: person.id, role: 'operator', plantIds: null });
     await expect(enter(session, slug, 'audit.read')).rejects.toMatchObject({ code: 'forbidden' });
@@ -316,7 +342,7 @@ describe('a member', () => {
     const { actor, slug } = await owner('Owned Water');
     await expect(removeMember(actor, actor.personId)).rejects.toMatchObject({ code: 'conflict' });
     const second = await joined(actor, 'owner');
-    const asSecond = await enter(sessionOf(second.id), slug, 'member.write');
+    const asSecond = await enter(await sessionOf(second.id), slug, 'member.write');
     await Promise.allSettled([
       removeMember(actor, second.id),
       removeMember(asSecond, actor.personId),
@@ -346,11 +372,11 @@ describe('a member', () => {
       person_id: SMALL_WORKS.personId,
       plant_id: 'plt_extra_1',
     });
-    const actor = await enter(sessionOf(SMALL_WORKS.personId), 'small', 'plant.read');
+    const actor = await enter(await sessionOf(SMALL_WORKS.personId), 'small', 'plant.read');
     expect(actor.plantIds).toEqual(['plt_extra_1']);
     expect((await readPlants(actor)).map(({ id }) => id)).toEqual(['plt_extra_1']);
     await admin('membership_plants').where({ person_id: SMALL_WORKS.personId }).delete();
-    const shut = await enter(sessionOf(SMALL_WORKS.personId), 'small', 'plant.read');
+    const shut = await enter(await sessionOf(SMALL_WORKS.personId), 'small', 'plant.read');
     expect(await readPlants(shut)).toEqual([]);
   });
 });

@@ -23,7 +23,7 @@ beforeAll(async () => {
   await insertSmallWorks(admin);
   await insertSmallWorks(admin, '-2');
   await admin('memberships').update({ role: 'manager' });
-  manager = await enter(sessionOf(SMALL_WORKS.personId), 'small', 'token.write');
+  manager = await enter(await sessionOf(SMALL_WORKS.personId), 'small', 'token.write');
 });
 afterAll(async () => {
   await pool().destroy();

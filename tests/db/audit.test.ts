@@ -25,7 +25,7 @@ beforeAll(async () => {
   admin = knex(ownerKnexConfig(database.adminUrl));
   await insertSmallWorks(admin);
   await insertSmallWorks(admin, '-2');
-  actor = await enter(sessionOf(SMALL_WORKS.personId), 'small', 'plan.write');
+  actor = await enter(await sessionOf(SMALL_WORKS.personId), 'small', 'plan.write');
 });
 afterAll(async () => {
   await pool().destroy();
@@ -77,7 +77,11 @@ describe('the audit trail', () => {
     const { entries, total } = await readAudit(actor, {}, 1);
     expect(total).toBe(entries.length);
     expect(entries[0]?.position).toBe(total);
-    const stranger = await enter(sessionOf(`${SMALL_WORKS.personId}-2`), 'small-2', 'plan.read');
+    const stranger = await enter(
+      await sessionOf(`${SMALL_WORKS.personId}-2`),
+      'small-2',
+      'plan.read',
+    );
     expect(await readAudit(stranger, {}, 1)).toEqual({ entries: [], total: 0, people: [] });
   });
 

@@ -41,6 +41,7 @@ describe('the schema', () => {
       'people',
       'rate_limits',
       'recovery_codes',
+      'sessions',
     ]);
   });
 

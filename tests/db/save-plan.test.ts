@@ -27,7 +27,7 @@ beforeAll(async () => {
   process.env.DATABASE_URL = database.url;
   admin = knex(ownerKnexConfig(database.adminUrl));
   await insertSmallWorks(admin);
-  actor = await enter(sessionOf(SMALL_WORKS.personId), 'small', 'plan.write');
+  actor = await enter(await sessionOf(SMALL_WORKS.personId), 'small', 'plan.write');
   ({ sampleId } = await saveSample(
     actor,
     sampleInput.parse({

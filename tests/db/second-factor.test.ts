@@ -7,6 +7,7 @@ import { checkSignIn } from '@/lib/auth/check-sign-in';
 import { hashPassword } from '@/lib/auth/passwords';
 import { beginSecondFactor, confirmSecondFactor, endSecondFactor } from '@/lib/auth/second-factor';
 import { findSignedIn } from '@/lib/auth/signed-in';
+import { requireProof } from '@/lib/people/require-proof';
 import { sessionOf } from '../support/session-of';
 import { insertSmallWorks, SMALL_WORKS } from '../support/small-works';
 import { createTestDatabase, type TestDatabase } from '../support/test-database';
@@ -42,7 +43,7 @@ afterAll(async () => {
 });
 
 async function me() {
-  const person = await findSignedIn(sessionOf(SMALL_WORKS.personId));
+  const person = await findSignedIn(await sessionOf(SMALL_WORKS.personId));
   if (person === null) throw new Error('Not signed in.');
   return person;
 }
@@ -116,6 +117,15 @@ describe('the second factor', () => {
     const kept = JSON.stringify([await admin('people'), await admin('recovery_codes')]);
     expect(kept).not.toContain(secret);
     for (const code of codes) expect(kept).not.toContain(code.replaceAll('-', ''));
+  });
+
+  it('is asked for, with the password, before the account’s locks are changed', async () => {
+    const { secret } = await turnedOn();
+    const proof = { password: PASSWORD, code: '' };
+    await expect(requireProof(await me(), proof, at(90))).rejects.toMatchObject({
+      code: 'badInput',
+    });
+    await requireProof(await me(), { ...proof, code: await codeAt(secret, 90) }, at(90));
   });
 
   it('is gone when it is turned off', async () => {

@@ -36,7 +36,6 @@ describe('signing in', () => {
       id: SMALL_WORKS.personId,
       name: 'Operator',
       email: EMAIL,
-      epoch: 0,
     });
   });
 

@@ -28,6 +28,8 @@ describe('settings', () => {
     ['a default password', { DATABASE_URL: 'postgres://app:postgres@db/marlwick' }, /default/],
     ['the example’s password', { DATABASE_URL: 'postgres://app:change-me@db/marlwick' }, /default/],
     ['no password', { DATABASE_URL: 'postgres://app@db/marlwick' }, /default/],
+    ['plain http', { NEXTAUTH_URL: 'http://water.test' }, /https/],
+    ['an outbox open to all', { MARLWICK_OUTBOX: '/tmp/letters' }, /SMTP_URL/],
     ['half a provider', { OIDC_ISSUER: 'https://id.test' }, /OIDC_CLIENT_ID.*OIDC_CLIENT_SECRET/],
   ])('are refused in production with %s', (_what, change, words) => {
     expect(() => readEnvironment({ ...good, ...change })).toThrow(words);

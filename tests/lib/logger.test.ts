@@ -8,6 +8,8 @@ describe('the log', () => {
   it('is one JSON object a line, with secrets and addresses blotted out', () => {
     const script = `
       import { logger } from './lib/logger.ts';
+      const error = Object.assign(new Error('duplicate key'), { code: '23505', detail: 'Key (password_hash)=(h4sh)' });
+      logger.error({ err: error }, 'failed');
       logger.info({ event: 'x', password: 'hunter', email: 'a@b.example', person: { passwordHash: 'h4sh', email: 'c@d.example' } }, 'said');
     `;
     const { stderr } = spawnSync(

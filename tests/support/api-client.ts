@@ -45,8 +45,10 @@ export function apiClient(
 }
 
 /** A field of an answer's object, as text. */
-export const textIn = (body: unknown, field: string): string =>
-  String((body as Readonly<Record<string, unknown>>)[field] ?? '');
+export function textIn(body: unknown, field: string): string {
+  const value = (body as Readonly<Record<string, unknown>>)[field];
+  return typeof value === 'string' || typeof value === 'number' ? String(value) : '';
+}
 
 /** The items of a page. */
 export const itemsIn = (body: unknown): Readonly<Record<string, unknown>>[] =>

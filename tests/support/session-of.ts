@@ -1,8 +1,8 @@
 import type { Credential } from '@/lib/auth/door';
+import { beginSession } from '@/lib/auth/sessions';
 
-/** What a browser of this person would bring to the door. */
-export const sessionOf = (personId: string, epoch = 0): Credential => ({
+/** What a browser of this person would bring to the door, just signed in. */
+export const sessionOf = async (personId: string): Promise<Credential> => ({
   kind: 'session',
-  personId,
-  epoch,
+  secret: await beginSession(personId),
 });

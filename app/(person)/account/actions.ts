@@ -3,30 +3,39 @@
 import QRCode from 'qrcode';
 import { personAction } from '@/lib/auth/member-action';
 import { beginSecondFactor } from '@/lib/auth/second-factor';
+import { endAllSessions, endSessionNamed } from '@/lib/auth/sessions';
 import { changePassword } from '@/lib/people/change-password';
-import { endAllSessions } from '@/lib/people/end-all-sessions';
-import { changePasswordInput, codeInput, passwordInput } from '@/lib/people/schema';
+import { requireProof } from '@/lib/people/require-proof';
+import { changePasswordInput, codeInput, proofInput, sessionInput } from '@/lib/people/schema';
 import { turnOffSecondFactor, turnOnSecondFactor } from '@/lib/people/switch-second-factor';
-import { requirePassword } from '@/lib/people/require-password';
 
 export const changePasswordAction = personAction(
   'change-password',
   changePasswordInput,
-  (person, { present, next }) => changePassword(person, present, next),
+  (person, { next, ...proof }) => changePassword(person, proof, next),
 );
 
 export const endAllSessionsAction = personAction(
   'end-all-sessions',
-  passwordInput,
-  (person, { password }) => requirePassword(person, password).then(() => endAllSessions(person.id)),
+  proofInput,
+  async (person, proof) => {
+    await requireProof(person, proof);
+    await endAllSessions(person.id);
+  },
+);
+
+export const endSessionAction = personAction(
+  'end-session',
+  sessionInput,
+  (person, { sessionHash }) => endSessionNamed(person.id, sessionHash),
 );
 
 /** The secret as text and as a drawing for the authenticator; the drawing is made here, nobody else sees it. */
 export const beginSecondFactorAction = personAction(
   'begin-second-factor',
-  passwordInput,
-  async (person, { password }) => {
-    await requirePassword(person, password);
+  proofInput,
+  async (person, proof) => {
+    await requireProof(person, proof);
     const { secret, uri } = await beginSecondFactor(person);
     return { secret, drawing: await QRCode.toDataURL(uri, { margin: 2, width: 220 }) };
   },
@@ -40,6 +49,6 @@ export const confirmSecondFactorAction = personAction(
 
 export const endSecondFactorAction = personAction(
   'end-second-factor',
-  passwordInput,
-  (person, { password }) => turnOffSecondFactor(person, password),
+  proofInput,
+  (person, proof) => turnOffSecondFactor(person, proof),
 );

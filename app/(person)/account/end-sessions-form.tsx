@@ -4,24 +4,19 @@ import { signOut } from 'next-auth/react';
 import { SimpleForm } from '@/components/forms/simple-form';
 import { paths } from '@/lib/paths';
 import { endAllSessionsAction } from './actions';
+import { proofFields } from './proof-fields';
 
-export function EndSessionsForm() {
+export function EndSessionsForm({ hasSecondFactor }: { hasSecondFactor: boolean }) {
   return (
     <>
       <p className="mt-2 max-w-sm text-ink-soft">
-        A lost tablet, a shared computer: this signs you out of every browser at its next click.
+        A lost tablet, a shared computer: this signs you out of every browser, this one too, at its
+        next click.
       </p>
       <SimpleForm
-        fields={[
-          {
-            name: 'password',
-            label: 'Password, to be sure it is you',
-            type: 'password',
-            autoComplete: 'current-password',
-          },
-        ]}
-        submit={async ({ password = '' }) => {
-          const answer = await endAllSessionsAction({ password });
+        fields={proofFields(hasSecondFactor)}
+        submit={async ({ password = '', code = '' }) => {
+          const answer = await endAllSessionsAction({ password, code });
           if (answer.ok) await signOut({ callbackUrl: paths.signIn });
           return answer;
         }}

@@ -4,17 +4,22 @@ import { SignOutButton } from '@/components/shell/sign-out-button';
 import { Wordmark } from '@/components/shell/wordmark';
 import { PageHeading } from '@/components/ui/page-heading';
 import { pagePerson } from '@/lib/auth/actor';
+import { readSessions } from '@/lib/auth/sessions';
+import { formatDayTime } from '@/lib/format';
 import { paths } from '@/lib/paths';
 import { readAccount } from '@/lib/people/read-account';
 import { EndSessionsForm } from './end-sessions-form';
 import { PasswordForm } from './password-form';
 import { SecondFactor } from './second-factor';
+import { SessionList } from './session-list';
 
 export const metadata: Metadata = { title: 'Your account' };
 
 export default async function AccountPage() {
   const person = await pagePerson();
   const { memberships, unusedCodes } = await readAccount(person);
+  const sessions = await readSessions(person.id);
+  const isOn = person.totpConfirmedAt !== null;
   return (
     <>
       <header className="mx-auto flex max-w-page items-center justify-between px-4 pt-3 pb-2 sm:px-8">
@@ -56,23 +61,41 @@ export default async function AccountPage() {
               <h2 id="second-factor" className="text-xl">
                 Second factor
               </h2>
-              <SecondFactor isOn={person.totpConfirmedAt !== null} unusedCodes={unusedCodes} />
+              <SecondFactor isOn={isOn} unusedCodes={unusedCodes} />
             </section>
             <section aria-labelledby="password">
               <h2 id="password" className="text-xl">
                 Password
               </h2>
-              <PasswordForm />
+              <PasswordForm hasSecondFactor={isOn} />
             </section>
             <section aria-labelledby="sessions">
               <h2 id="sessions" className="text-xl">
                 Sessions
               </h2>
-              <EndSessionsForm />
+              <SessionList
+                sessions={sessions.map(({ sessionHash, browser, lastSeenAt }) => ({
+                  sessionHash,
+                  browser: shortBrowser(browser),
+                  lastSeen: `${formatDayTime(lastSeenAt, 'UTC')} UTC`,
+                  isThis: sessionHash === person.sessionHash,
+                }))}
+              />
+              <EndSessionsForm hasSecondFactor={isOn} />
             </section>
           </div>
         </main>
       </div>
     </>
   );
+}
+
+/** `Chrome on Linux` out of what a browser calls itself, which is long and mostly history. */
+function shortBrowser(name: string): string {
+  const browser = ['Edg', 'Firefox', 'Chrome', 'Safari'].find((each) => name.includes(each));
+  const system = ['Windows', 'Android', 'iPhone', 'iPad', 'Mac OS', 'Linux'].find((each) =>
+    name.includes(each),
+  );
+  if (browser === undefined) return name.slice(0, 40);
+  return `${browser === 'Edg' ? 'Edge' : browser}${system === undefined ? '' : ` on ${system}`}`;
 }

@@ -4,9 +4,10 @@ import { signOut } from 'next-auth/react';
 import { SimpleForm } from '@/components/forms/simple-form';
 import { paths } from '@/lib/paths';
 import { changePasswordAction } from './actions';
+import { proofFields } from './proof-fields';
 
 /** A new password ends every session, this one too. */
-export function PasswordForm() {
+export function PasswordForm({ hasSecondFactor }: { hasSecondFactor: boolean }) {
   return (
     <>
       <p className="mt-2 max-w-sm text-ink-soft">
@@ -14,12 +15,7 @@ export function PasswordForm() {
       </p>
       <SimpleForm
         fields={[
-          {
-            name: 'present',
-            label: 'Present password',
-            type: 'password',
-            autoComplete: 'current-password',
-          },
+          ...proofFields(hasSecondFactor, 'Present password'),
           {
             name: 'next',
             label: 'New password',
@@ -28,8 +24,8 @@ export function PasswordForm() {
             hint: 'At least 12 characters; three or four words do well',
           },
         ]}
-        submit={async ({ present = '', next = '' }) => {
-          const answer = await changePasswordAction({ present, next });
+        submit={async ({ password = '', code = '', next = '' }) => {
+          const answer = await changePasswordAction({ password, code, next });
           if (answer.ok) await signOut({ callbackUrl: paths.signIn });
           return answer;
         }}

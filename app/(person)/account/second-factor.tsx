@@ -3,7 +3,7 @@
 import Image from 'next/image';
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
-import { SimpleForm, type SimpleField } from '@/components/forms/simple-form';
+import { SimpleForm } from '@/components/forms/simple-form';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import {
@@ -11,13 +11,7 @@ import {
   confirmSecondFactorAction,
   endSecondFactorAction,
 } from './actions';
-
-const PASSWORD: SimpleField = {
-  name: 'password',
-  label: 'Password, to be sure it is you',
-  type: 'password',
-  autoComplete: 'current-password',
-};
+import { proofFields } from './proof-fields';
 
 /** On or off; turning it on goes over a drawing to scan, a first code and the recovery codes. */
 export function SecondFactor({ isOn, unusedCodes }: { isOn: boolean; unusedCodes: number }) {
@@ -45,9 +39,9 @@ export function SecondFactor({ isOn, unusedCodes }: { isOn: boolean; unusedCodes
           again.
         </p>
         <SimpleForm
-          fields={[PASSWORD]}
-          submit={async ({ password = '' }) => {
-            const answer = await endSecondFactorAction({ password });
+          fields={proofFields(true)}
+          submit={async ({ password = '', code = '' }) => {
+            const answer = await endSecondFactorAction({ password, code });
             if (answer.ok) router.refresh();
             return answer;
           }}
@@ -95,9 +89,9 @@ export function SecondFactor({ isOn, unusedCodes }: { isOn: boolean; unusedCodes
         your phone shows.
       </p>
       <SimpleForm
-        fields={[PASSWORD]}
+        fields={proofFields(false)}
         submit={async ({ password = '' }) => {
-          const answer = await beginSecondFactorAction({ password });
+          const answer = await beginSecondFactorAction({ password, code: '' });
           if (answer.ok) setBegun(answer.value);
           return answer;
         }}

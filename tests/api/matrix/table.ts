@@ -189,6 +189,7 @@ export const ACTIONS: readonly ActionRow[] = [
   action('(auth)/', 'acceptInvitationAction', 'public'),
   action('(person)/account/', 'changePasswordAction', 'person'),
   action('(person)/account/', 'endAllSessionsAction', 'person'),
+  action('(person)/account/', 'endSessionAction', 'person'),
   action('(person)/account/', 'beginSecondFactorAction', 'person'),
   action('(person)/account/', 'confirmSecondFactorAction', 'person'),
   action('(person)/account/', 'endSecondFactorAction', 'person'),
@@ -196,6 +197,7 @@ export const ACTIONS: readonly ActionRow[] = [
   action(`${ORG}people/`, 'revokeInvitationAction', 'member.write'),
   action(`${ORG}people/`, 'changeMemberAction', 'member.write'),
   action(`${ORG}people/`, 'removeMemberAction', 'member.write'),
+  action(`${ORG}people/`, 'signOutMemberAction', 'member.write'),
   action(`${ORG}tokens/`, 'makeTokenAction', 'token.write'),
   action(`${ORG}tokens/`, 'revokeTokenAction', 'token.write'),
   action(`${PLANT}samples/new/`, 'saveSampleAction', 'sample.write', ({ plant }) => ({

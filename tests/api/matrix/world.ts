@@ -1,6 +1,8 @@
 import type { Knex } from 'knex';
 import { hashPassword } from '@/lib/auth/passwords';
 import { ROLES, TOKEN_SCOPES, type Role, type TokenScope } from '@/lib/auth/permissions';
+import { solveWater, type WaterAnalysis } from '@/lib/engine';
+import { planQuantitiesOf } from '@/lib/plans/quantities';
 import { insertToken } from '../../support/make-token';
 import { sessionCookie } from '../../support/sign-in';
 
@@ -193,7 +195,7 @@ async function insertPlant(
     engine_version: 'test',
     constants_hash: 'test',
     analysis: JSON.stringify(analysis),
-    predicted: JSON.stringify({ before: {}, equilibrium: {} }),
+    predicted: JSON.stringify(predictedOf(analysis)),
     reason: '',
     created_by: writer,
   });
@@ -261,4 +263,12 @@ async function insertCaller(
     expiredToken: await token({ expiresAt: new Date(Date.now() - 1000) }),
     revokedToken: await token({ revokedAt: new Date() }),
   };
+}
+
+/** Before and after alike: what a plan without effect would predict. */
+function predictedOf(analysis: WaterAnalysis) {
+  const solved = solveWater(analysis);
+  if (!solved.ok) throw new Error(solved.message);
+  const quantities = planQuantitiesOf(solved.water);
+  return { before: quantities, equilibrium: quantities };
 }

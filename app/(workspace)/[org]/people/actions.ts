@@ -8,7 +8,7 @@ import {
   memberChangeInput,
   memberIdInput,
 } from '@/lib/people/member-schema';
-import { changeMember, removeMember } from '@/lib/people/members';
+import { changeMember, removeMember, signOutMember } from '@/lib/people/members';
 
 export const inviteAction = memberAction('member.write', invitationInput, invite);
 
@@ -24,4 +24,10 @@ export const removeMemberAction = memberAction(
   'member.write',
   memberIdInput,
   (actor, { personId }) => removeMember(actor, personId),
+);
+
+export const signOutMemberAction = memberAction(
+  'member.write',
+  memberIdInput,
+  (actor, { personId }) => signOutMember(actor, personId),
 );

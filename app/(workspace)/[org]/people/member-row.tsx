@@ -5,7 +5,7 @@ import { useAction } from '@/components/forms/use-action';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import type { Role } from '@/lib/auth/permissions';
-import { changeMemberAction, removeMemberAction } from './actions';
+import { changeMemberAction, removeMemberAction, signOutMemberAction } from './actions';
 import { RoleAndPlantsFields, type RoleAndPlants } from './role-and-plants';
 
 export interface ShownMember {
@@ -107,6 +107,22 @@ export function MemberRow({
             </Button>
             <Button onClick={() => setOpened(undefined)}>Leave it</Button>
           </div>
+          {isSelf ? null : (
+            <p className="border-t border-rule pt-3 text-sm">
+              A lost tablet?{' '}
+              <Button
+                disabled={isBusy}
+                onClick={() =>
+                  run(
+                    () => signOutMemberAction(organisationSlug, { personId }),
+                    () => setOpened(undefined),
+                  )
+                }
+              >
+                Sign {name} out everywhere
+              </Button>
+            </p>
+          )}
         </div>
       ) : null}
       {opened === 'remove' ? (
