@@ -17,7 +17,6 @@ const HEADERS = { 'cache-control': 'no-store' } as const;
 /** `{"error":{"code","message"}}` with its status; what is not ours to explain says nothing internal. */
 export function errorToJson(error: unknown): Response {
   if (error instanceof AppError) {
-    if (error.code === 'forbidden') logger.warn({ event: 'door-shut' }, 'a request was forbidden');
     return Response.json(
       { error: { code: error.code, message: error.userMessage } },
       {

@@ -75,12 +75,21 @@ export const isAuditAction = (text: string): text is AuditAction => text in AUDI
 
 /** Which part of the trail to read: by kind, by person, by UTC day. */
 export const auditQuery = z.object({
-  action: z.string().refine(isAuditAction, 'is no kind of change').optional().catch(undefined),
-  person: z.string().max(60).optional().catch(undefined),
-  from: z.iso.date().optional().catch(undefined),
-  to: z.iso.date().optional().catch(undefined),
+  action: z.string().refine(isAuditAction, 'is no kind of change').optional(),
+  person: z.string().min(1).max(60).optional(),
+  from: z.iso.date({ error: 'write a day as YYYY-MM-DD' }).optional(),
+  to: z.iso.date({ error: 'write a day as YYYY-MM-DD' }).optional(),
 });
 export type AuditQuery = z.output<typeof auditQuery>;
+
+/** The filter in a page's address; a part that makes no sense, or is empty, filters nothing. */
+export function auditQueryIn(asked: Readonly<Record<string, unknown>>): AuditQuery {
+  const parts = Object.entries(auditQuery.shape).map(([name, schema]) => [
+    name,
+    schema.safeParse(asked[name]).data,
+  ]);
+  return Object.fromEntries(parts) as AuditQuery;
+}
 
 /** One line of the trail. */
 export interface AuditEntry {

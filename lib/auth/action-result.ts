@@ -30,7 +30,6 @@ export async function answerAction<Schema extends z.ZodType, Who, Value>(
     return { ok: true, value: await work(actor, parsed.data) };
   } catch (error) {
     if (error instanceof AppError) {
-      if (error.code === 'forbidden') logger.warn({ event: 'door-shut', name }, 'forbidden');
       return refused(error.userMessage, []);
     }
     logger.error({ err: error, name }, 'an action failed');

@@ -2,6 +2,7 @@ import { randomBytes } from 'node:crypto';
 import { findApiToken, touchApiToken } from '@/db/queries/api-tokens';
 import { inContext } from '@/db/tenant';
 import { AppError } from '@/lib/errors';
+import { logger } from '@/lib/logger';
 import { isTokenScope, type TokenScope } from './permissions';
 import { hashOfSecret, newSecret } from './secret';
 
@@ -44,6 +45,7 @@ export async function readApiToken(text: string, now: Date): Promise<ApiTokenHol
     ? await inContext({ tokenHash }, (db) => findApiToken(db, tokenHash))
     : undefined;
   if (token === undefined || token.revokedAt !== null || token.expiresAt <= now) {
+    logger.warn({ event: 'token-refused', tokenId: token?.id }, 'an API token was refused');
     throw new AppError('signedOut', NOT_GOOD);
   }
   await inContext({ organisationId: token.organisationId }, (db) =>

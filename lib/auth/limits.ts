@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import { countTry, forgetTries, secondsBlocked, type RateLimit } from '@/db/rate-limits';
 import { AppError } from '@/lib/errors';
+import { logger } from '@/lib/logger';
 
 const MINUTE_S = 60;
 const HOUR_S = 60 * MINUTE_S;
@@ -29,7 +30,9 @@ const keyOf = (subject: string): string => createHash('sha256').update(subject).
 /** Throws `tooMany` while the subject is closed. Counts nothing. */
 export async function refuseWhenClosed(name: LimitName, subject: string): Promise<void> {
   const seconds = await secondsBlocked(limitOf(name), keyOf(subject));
-  if (seconds > 0) throw tooMany(seconds);
+  if (seconds === 0) return;
+  logger.warn({ event: 'limit-exceeded', limit: name }, 'tried too often');
+  throw tooMany(seconds);
 }
 
 export const countTryOf = (name: LimitName, subject: string): Promise<void> =>

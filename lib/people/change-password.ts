@@ -3,6 +3,7 @@ import { endSessions } from '@/db/queries/sessions';
 import { inContext } from '@/db/tenant';
 import { systemClock } from '@/lib/clock';
 import { hashPassword } from '@/lib/auth/passwords';
+import { logger } from '@/lib/logger';
 import { sendPasswordChanged } from '@/lib/mail/account-letters';
 import { requireProof, type Proof } from './require-proof';
 
@@ -18,5 +19,6 @@ export async function changePassword(
     await updatePerson(db, person.id, { passwordHash });
     await endSessions(db, person.id, systemClock());
   });
+  logger.info({ event: 'password-changed', personId: person.id }, 'a password was changed');
   await sendPasswordChanged(person.email, person.name);
 }

@@ -3,6 +3,7 @@ import { endSessions } from '@/db/queries/sessions';
 import { forgetTriesOf } from '@/lib/auth/limits';
 import { hashPassword } from '@/lib/auth/passwords';
 import { systemClock, type Clock } from '@/lib/clock';
+import { logger } from '@/lib/logger';
 import { sendPasswordChanged } from '@/lib/mail/account-letters';
 import { spendLink } from './one-time-link';
 
@@ -23,6 +24,7 @@ export async function setNewPassword(
     return found;
   });
   if (person === undefined) return;
+  logger.info({ event: 'password-changed', personId: person.id }, 'a password was replaced');
   await forgetTriesOf('sign-in', person.email);
   await sendPasswordChanged(person.email, person.name);
 }

@@ -49,7 +49,9 @@ describe('one organisation at another’s door', () => {
       const holding = uniform() < 0.5 ? victim : thief.holding;
       const plant = mixed(pick, victim, thief.holding);
       // One's own name with one's own plant is no crossing; skip the pure case.
-      const isOwn = holding === thief.holding && Object.values(plant).every((id) => !marks.has(id));
+      const isOwn =
+        holding === thief.holding &&
+        Object.values<string>({ ...plant }).every((id) => !marks.has(id));
       if (isOwn && plant.slug === thief.holding.plants[0].slug) return one();
       const answer = await send(row, { holding, plant }, token);
       statuses.set(answer.status, (statuses.get(answer.status) ?? 0) + 1);

@@ -1,3 +1,4 @@
+import { request } from 'node:http';
 import { describe, expect, inject, it } from 'vitest';
 
 const baseUrl = inject('baseUrl');
@@ -40,5 +41,36 @@ describe('every answer of the running server', () => {
       expect(cookie).toMatch(/HttpOnly/i);
       expect(cookie).toMatch(/SameSite=Lax/i);
     }
+  });
+
+  it('is no document for other sites, sniffed or framed, if it is a static file', async () => {
+    const page = await (await fetch(`${baseUrl}/sign-in`)).text();
+    const script = /\/_next\/static\/[^"]+\.js/.exec(page)?.[0] ?? '';
+    for (const path of [script, '/icon.svg', '/favicon.ico']) {
+      const { status, headers } = await fetch(`${baseUrl}${path}`);
+      expect(status, path).toBe(200);
+      expect(headers.get('x-content-type-options'), path).toBe('nosniff');
+      expect(headers.get('content-security-policy'), path).toContain("frame-ancestors 'none'");
+    }
+  });
+
+  it('never echoes a request back to who sends TRACE', async () => {
+    const { status, text } = await new Promise<{ status: number; text: string }>(
+      (resolve, reject) => {
+        const asked = request(
+          `${baseUrl}/api/health`,
+          { method: 'TRACE', headers: { 'x-marker': 'echo-me' } },
+          (answer) => {
+            let body = '';
+            answer.on('data', (chunk) => (body += String(chunk)));
+            answer.on('end', () => resolve({ status: answer.statusCode ?? 0, text: body }));
+          },
+        );
+        asked.on('error', reject);
+        asked.end();
+      },
+    );
+    expect(status).toBeGreaterThanOrEqual(400);
+    expect(text).not.toContain('echo-me');
   });
 });

@@ -3,7 +3,7 @@ import Link from 'next/link';
 import { buttonClass } from '@/components/ui/button';
 import { PageHeading } from '@/components/ui/page-heading';
 import { AUDIT_PAGE_SIZE, readAudit } from '@/lib/audit/read-audit';
-import { auditQuery } from '@/lib/audit/schema';
+import { auditQueryIn } from '@/lib/audit/schema';
 import { pageActor } from '@/lib/auth/actor';
 import { paths } from '@/lib/paths';
 import { AuditFilterForm } from './audit-filter';
@@ -21,7 +21,7 @@ export default async function AuditPage({
   const { org } = await params;
   const actor = await pageActor(org, 'audit.read');
   const asked = await searchParams;
-  const filter = auditQuery.parse(asked);
+  const filter = auditQueryIn(asked);
   const page = /^[1-9]\d{0,5}$/.test(asked['page'] ?? '') ? Number(asked['page']) : 1;
   const { entries, total, people } = await readAudit(actor, filter, page);
   const pages = Math.max(1, Math.ceil(total / AUDIT_PAGE_SIZE));
