@@ -5,14 +5,14 @@ import { launchBrowser, openPage } from '../support/browser';
 import { signIn, signInOf } from '../support/sign-in';
 
 const baseUrl = inject('baseUrl');
-const operator = signInOf(inject('signIns'), 'operator');
+const owner = signInOf(inject('signIns'), 'owner');
 let browser: Browser;
 let session: Cookie[];
 
 beforeAll(async () => {
   browser = await launchBrowser();
   const { page, close } = await openPage(browser, baseUrl);
-  await signIn(page, operator);
+  await signIn(page, owner);
   session = await page.context().cookies();
   await close();
 });
@@ -24,7 +24,17 @@ const PAGES = [
   `${PLANT}/samples`,
   `${PLANT}/samples/new?point=raw`,
   `${PLANT}/plans`,
+  `${PLANT}/targets`,
   `${PLANT}/trends`,
+  '/calverdine/people',
+  '/calverdine/tokens',
+  '/calverdine/audit',
+  '/account',
+  '/api-guide',
+  '/outbox',
+  '/sign-up',
+  '/forgotten-password',
+  '/invitation',
 ] as const;
 
 describe.each([

@@ -100,6 +100,7 @@ describe('people of a new utility, in the browser', () => {
     const third = await openPage(browser, baseUrl);
     await third.page.goto('/sign-in');
     await third.page.getByRole('link', { name: 'Forgotten password' }).click();
+    await third.page.getByRole('heading', { name: 'Forgotten password' }).waitFor();
     await third.page.getByLabel('E-mail').fill(OWNER.email);
     await third.page.getByRole('button', { name: 'Send the link' }).click();
     await third.page.getByText('Look into your mail').waitFor();
