@@ -1,5 +1,5 @@
 import { solveWater } from '../../lib/engine';
-import { factorise, substitute } from '../../lib/engine/numeric/lu';
+import { backSubstitute, factorise } from '../../lib/engine/numeric/lu';
 import { evaluate } from '../../lib/engine/speciation/evaluate';
 import { fillGaps } from '../../lib/engine/speciation/gaps';
 import { fillJacobian } from '../../lib/engine/speciation/jacobian';
@@ -26,8 +26,8 @@ export function benchKernel(): Line[] {
     evaluate(w);
     fillGaps(w, CLOSED);
     fillJacobian(w, CLOSED);
-    factorise(w.matrix, size, w.stride, w.pivots);
-    substitute(w.matrix, size, w.stride, w.pivots, w.right);
+    factorise(w.matrix, size, w.stride, w.pivots, w.right);
+    backSubstitute(w.matrix, size, w.stride, w.right);
   };
 
   const exponents = Float64Array.from({ length: species }, (_, i) => -((i * 7) % 23));
@@ -44,8 +44,8 @@ export function benchKernel(): Line[] {
   const elimination = () => {
     work.set(matrix);
     right.fill(1);
-    factorise(work, components, components, pivots);
-    substitute(work, components, components, pivots, right);
+    factorise(work, components, components, pivots, right);
+    backSubstitute(work, components, components, right);
   };
   const warmSolve = () => {
     w.unknowns.set(rest);

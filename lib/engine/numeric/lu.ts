@@ -6,10 +6,17 @@
  */
 
 /**
- * Factorises the leading n × n block of `a` (row stride `stride`) in place and records the row order in `pivots`.
+ * Factorises the leading n × n block of `a` (row stride `stride`) in place and records the row order in `pivots`. A right
+ * side `b` given with it is carried along, exchanged and eliminated with the rows, so that `backSubstitute` finishes it.
  * Returns false when a pivot is zero or not finite; the contents of `a` are then of no use.
  */
-export function factorise(a: Float64Array, n: number, stride: number, pivots: Int32Array): boolean {
+export function factorise(
+  a: Float64Array,
+  n: number,
+  stride: number,
+  pivots: Int32Array,
+  b?: Float64Array,
+): boolean {
   for (let k = 0; k < n; k++) {
     let best = k;
     let largest = Math.abs(a[k * stride + k] as number);
@@ -30,6 +37,11 @@ export function factorise(a: Float64Array, n: number, stride: number, pivots: In
         a[rowK + j] = a[rowBest + j] as number;
         a[rowBest + j] = held;
       }
+      if (b !== undefined) {
+        const held = b[k] as number;
+        b[k] = b[best] as number;
+        b[best] = held;
+      }
     }
     const inverse = 1 / (a[rowK + k] as number);
     for (let i = k + 1; i < n; i++) {
@@ -38,6 +50,7 @@ export function factorise(a: Float64Array, n: number, stride: number, pivots: In
       if (lower === 0) continue;
       const factor = lower * inverse;
       a[rowI + k] = factor;
+      if (b !== undefined) b[i] = (b[i] as number) - factor * (b[k] as number);
       for (let j = k + 1; j < n; j++) {
         a[rowI + j] = (a[rowI + j] as number) - factor * (a[rowK + j] as number);
       }
@@ -68,6 +81,11 @@ export function substitute(
     for (let j = 0; j < i; j++) sum -= (a[row + j] as number) * (b[j] as number);
     b[i] = sum;
   }
+  backSubstitute(a, n, stride, b);
+}
+
+/** Solves U·x = b with the upper factor, leaving x in `b`. */
+export function backSubstitute(a: Float64Array, n: number, stride: number, b: Float64Array): void {
   for (let i = n - 1; i >= 0; i--) {
     let sum = b[i] as number;
     const row = i * stride;

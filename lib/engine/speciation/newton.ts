@@ -1,4 +1,4 @@
-import { factorise, substitute } from '../numeric/lu';
+import { backSubstitute, factorise, substitute } from '../numeric/lu';
 import { evaluate } from './evaluate';
 import { fillGaps } from './gaps';
 import { fillJacobian } from './jacobian';
@@ -63,10 +63,10 @@ export function solveByNewton(workspace: Workspace, problem: Problem, limit = 40
     previous = residual;
     if (!factored || residual > TOLERANCE) {
       fillJacobian(workspace, problem);
-      factored = factorise(matrix, size, stride, pivots);
+      factored = factorise(matrix, size, stride, pivots, right);
       if (!factored) return { converged: false, why: 'singular', iterations, residual };
-    }
-    substitute(matrix, size, stride, pivots, right);
+      backSubstitute(matrix, size, stride, right);
+    } else substitute(matrix, size, stride, pivots, right);
     step(workspace, size);
   }
 }
