@@ -9,6 +9,25 @@ describe('the permission table', () => {
           "manager",
           "owner",
         ],
+        "feed.read": [
+          "operator",
+          "consultant",
+          "manager",
+          "owner",
+        ],
+        "feed.write": [
+          "operator",
+          "manager",
+          "owner",
+        ],
+        "member.read": [
+          "manager",
+          "owner",
+        ],
+        "member.write": [
+          "manager",
+          "owner",
+        ],
         "plan.read": [
           "operator",
           "consultant",
@@ -35,6 +54,19 @@ describe('the permission table', () => {
         ],
         "sample.write": [
           "operator",
+          "manager",
+          "owner",
+        ],
+        "target.write": [
+          "consultant",
+          "manager",
+          "owner",
+        ],
+        "token.read": [
+          "manager",
+          "owner",
+        ],
+        "token.write": [
           "manager",
           "owner",
         ],
