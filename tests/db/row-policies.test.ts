@@ -94,6 +94,39 @@ describe('row policies', () => {
     });
   });
 
+  it('show who sees named plants only those, in every table that names a plant, and nothing of none', async () => {
+    const named = [
+      'plants',
+      'sampling_points',
+      'train_steps',
+      'dosing_points',
+      'shift_notes',
+      'samples',
+      'plans',
+      'feed_log',
+    ];
+    const restricted = await admin('pg_policies')
+      .where({ policyname: 'named_plants', permissive: 'RESTRICTIVE' })
+      .pluck('tablename');
+    expect((restricted as string[]).sort()).toEqual([...named].sort());
+    const { rows } = await admin.raw<{ rows: { name: string }[] }>(
+      `select table_name as name from information_schema.columns
+       where table_schema = 'public' and column_name = 'plant_id' and table_name <> 'membership_plants'`,
+    );
+    expect([...rows.map(({ name }) => name), 'plants'].sort()).toEqual([...named].sort());
+    await asApp({ ...OURS, plantIds: [SMALL_WORKS.plantId] }, async (db) => {
+      expect(await db('plants').pluck('id')).toEqual([SMALL_WORKS.plantId]);
+      expect(await db('sampling_points')).toHaveLength(1);
+    });
+    await asApp({ ...OURS, plantIds: [`${SMALL_WORKS.plantId}-2`] }, async (db) => {
+      expect(await db('plants')).toEqual([]);
+      expect(await db('sampling_points')).toEqual([]);
+    });
+    await asApp({ ...OURS, plantIds: [] }, async (db) => {
+      expect(await db('plants')).toEqual([]);
+    });
+  });
+
   it('let nobody write into another organisation', async () => {
     const stray = {
       ...(await admin('plants').first<Record<string, unknown>>()),

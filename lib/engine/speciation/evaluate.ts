@@ -20,7 +20,11 @@ function fillMolalities(workspace: Workspace): void {
   const { from, terms, halfSquare, classIndex } = system;
   const n = molality.length;
   const m = workspace.sums.length;
-  for (let i = 0; i < n; i++) {
+  // The basis species stand first, one to a column: their activity is the unknown itself.
+  for (let j = 0; j < m; j++) {
+    molality[j] = (unknowns[j] as number) - (lnGamma[classIndex[j] as number] as number);
+  }
+  for (let i = m; i < n; i++) {
     molality[i] = (lnK[i] as number) - (lnGamma[classIndex[i] as number] as number);
   }
   for (let j = 0; j < m; j++) {
@@ -31,13 +35,14 @@ function fillMolalities(workspace: Workspace): void {
       molality[i] = (molality[i] as number) + (terms[p + 1] as number) * lnActivity;
     }
   }
+  // A loop of its own: around each call of exp the processor would have to put everything else aside.
+  for (let i = 0; i < n; i++) molality[i] = Math.exp(molality[i] as number);
   let ionic = 0;
   let ionicSlope = 0;
   for (let i = 0; i < n; i++) {
-    const amount = Math.exp(molality[i] as number);
+    const amount = molality[i] as number;
     const strength = (halfSquare[i] as number) * amount;
     const by = slope[classIndex[i] as number] as number;
-    molality[i] = amount;
     steep[i] = amount * by;
     ionic += strength;
     ionicSlope += strength * by;
@@ -56,11 +61,11 @@ function addBalances({
   ionicBy,
   scalars,
 }: Workspace): void {
-  const { from, terms, termStrength, acids, hydrogen } = system;
+  const { from, terms, termStrength, halfSquare, acids, hydrogen } = system;
   for (let j = 0; j < sums.length; j++) {
-    let sum = 0;
-    let sumSteep = 0;
-    let sumHalf = 0;
+    let sum = molality[j] as number;
+    let sumSteep = steep[j] as number;
+    let sumHalf = (halfSquare[j] as number) * sum;
     const to = 2 * (from[j + 1] as number);
     for (let p = 2 * (from[j] as number); p < to; p += 2) {
       const i = terms[p] as number;

@@ -190,7 +190,7 @@ export function settle(workspace: Workspace, carbonHeld: boolean): void {
 /** Σ count² · molality: the derivative of a component's sum by its own ln activity. */
 function squareSum({ system, molality }: Workspace, column: number): number {
   const { from, terms } = system;
-  let sum = 0;
+  let sum = molality[column] as number;
   const to = 2 * (from[column + 1] as number);
   for (let p = 2 * (from[column] as number); p < to; p += 2) {
     sum += (terms[p + 1] as number) ** 2 * (molality[terms[p] as number] as number);

@@ -23,7 +23,10 @@ export interface System {
   readonly charges: Float64Array;
   /** ½ z² of each species. */
   readonly halfSquare: Float64Array;
-  /** Composition by component: run from[j] … from[j + 1] of pairs in `terms`, a species and its moles of j. */
+  /**
+   * Composition by component: run from[j] … from[j + 1] of pairs in `terms`, a species and its moles of j. The basis
+   * species themselves, which are the first of `species` and hold one mole of their own component, are left out.
+   */
   readonly from: Int32Array;
   readonly terms: Int32Array;
   /** Moles of j times ½ z² of the species, term by term. */
@@ -133,9 +136,15 @@ function byComponent(
   counts: readonly number[],
   species: readonly Entry[],
 ) {
-  const order = columns.map((_, p) => p).sort((a, b) => (columns[a] ?? 0) - (columns[b] ?? 0));
+  const order = columns
+    .map((_, p) => p)
+    .filter((p) => (owners[p] ?? 0) >= m)
+    .sort((a, b) => (columns[a] ?? 0) - (columns[b] ?? 0));
   const from = new Int32Array(m + 1);
-  for (const column of columns) from[column + 1] = (from[column + 1] ?? 0) + 1;
+  for (const p of order) {
+    const column = columns[p] ?? 0;
+    from[column + 1] = (from[column + 1] ?? 0) + 1;
+  }
   for (let j = 0; j < m; j++) from[j + 1] = (from[j + 1] ?? 0) + (from[j] ?? 0);
   return {
     from,
