@@ -167,7 +167,7 @@ describe('a token', () => {
     await page.getByRole('link', { name: 'Tokens' }).click();
     await page.getByLabel('Name').fill('Level logger');
     await page.getByRole('button', { name: 'Make the token' }).click();
-    const token = await page.getByText(/^mwk_/).innerText();
+    const token = await page.getByText(/^mwk_[a-z0-9]{6}_[\w-]{43}$/).innerText();
     const ask = () =>
       fetch(`${baseUrl}/api/v1/calverdine/plants`, {
         headers: { authorization: `Bearer ${token}` },

@@ -7,6 +7,7 @@ import { checkAnalysis, HIGHEST_CO2_ATM, type CheckedAnalysis } from './analysis
 import { solveClosed } from './closed';
 import { describe } from './describe';
 import { constantsAt } from './equilibrium-constants';
+import { solvePressureAndCarbon } from './pressure-and-carbon';
 import { solveConditions, type Outcome } from './solve';
 import type { Start } from './start';
 import { foundTotals, startFrom } from './state';
@@ -70,24 +71,21 @@ function withPressure(checked: CheckedAnalysis, pressureAtm: number): Solved | R
   const { temperatureC, totals, given } = checked;
   const lnCarbonDioxide =
     Math.log(pressureAtm) + Math.LN10 * constantsAt(temperatureC).carbonDioxide;
-  const problem: Problem = {
-    carbonRow: 'held',
-    hydrogenRow:
-      given.pH !== undefined
-        ? 'held'
-        : given.inorganicCarbonMgLC !== undefined
-          ? 'carbon'
-          : 'alkalinity',
-  };
-  const held = given.pH === undefined ? {} : { lnHydrogen: -given.pH * Math.LN10 };
-  const outcome = solveConditions({ temperatureC, totals, problem, lnCarbonDioxide, ...held });
-  if (problem.hydrogenRow === 'carbon' && !(outcome.ending.converged && acidWithinRange(outcome))) {
+  if (given.inorganicCarbonMgLC !== undefined) {
+    const found = solvePressureAndCarbon({ temperatureC, totals, lnCarbonDioxide });
+    if (found) return finish(checked, found, foundTotals(found.workspace, totals));
     return refuse(
       'badInput',
       'At this CO2 pressure dissolved CO2 alone exceeds the inorganic carbon given.',
       'inorganicCarbonMgLC',
     );
   }
+  const problem: Problem = {
+    carbonRow: 'held',
+    hydrogenRow: given.pH === undefined ? 'alkalinity' : 'held',
+  };
+  const held = given.pH === undefined ? {} : { lnHydrogen: -given.pH * Math.LN10 };
+  const outcome = solveConditions({ temperatureC, totals, problem, lnCarbonDioxide, ...held });
   const known = given.alkalinityMgLCaCO3 !== undefined;
   return finish(checked, outcome, foundTotals(outcome.workspace, totals, known));
 }
@@ -128,9 +126,6 @@ function startWithCarbonate(bare: Workspace, carbonate: number, temperatureC: nu
   start.lnActivity[CARBON] = Math.log(carbonate / (k1 + 2 * k2));
   return { ...start, ionicStrengthMolKg: start.ionicStrengthMolKg + carbonate / 2 };
 }
-
-const acidWithinRange = ({ workspace }: Outcome): boolean =>
-  (workspace.unknowns[HYDROGEN] ?? Infinity) < Math.LN10 / 2;
 
 function finish(
   checked: CheckedAnalysis,

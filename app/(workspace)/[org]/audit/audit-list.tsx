@@ -8,7 +8,7 @@ export function AuditList({ entries }: { entries: readonly AuditEntry[] }) {
       {entries.map((entry) => (
         <li
           key={entry.position}
-          className="grid gap-x-6 border-b border-rule py-3 last:border-b-0 sm:grid-cols-[13rem_1fr]"
+          className="grid grid-cols-[minmax(0,1fr)] gap-x-6 border-b border-rule py-3 last:border-b-0 sm:grid-cols-[13rem_minmax(0,1fr)]"
         >
           <p className="text-sm text-ink-soft">
             <span className="figure">{entry.position}</span>. {formatDayTime(entry.at, 'UTC')} UTC
@@ -18,7 +18,9 @@ export function AuditList({ entries }: { entries: readonly AuditEntry[] }) {
           <div>
             <p>
               <strong>{wordsFor(entry.action)}</strong>{' '}
-              <span className="figure text-sm text-ink-soft">{entry.subjectId}</span>
+              <span className="figure text-sm break-all whitespace-normal text-ink-soft">
+                {entry.subjectId}
+              </span>
             </p>
             <details className="text-sm">
               <summary className="flex min-h-8 items-center text-verdigris">
