@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { solveWater, type WaterAnalysis } from '@/lib/engine';
+import { solveWater } from '@/lib/engine';
 import { randomWaters } from '../../docker-free-scripts/bench/random-waters';
 
 const WATERS = 2000;
