@@ -3,6 +3,16 @@ import type { Analyte, Dose, ReagentKey, WaterAnalysis } from '@/lib/engine';
 import { ANALYTE_KEYS } from '@/lib/engine/constants/analytes';
 import { REAGENTS } from '@/lib/engine';
 
+/** Two of the four that fix the carbonate system. */
+export const CARBONATE_PAIRS = [
+  ['pH', 'alkalinityMgLCaCO3'],
+  ['pH', 'inorganicCarbonMgLC'],
+  ['pH', 'carbonDioxideAtm'],
+  ['alkalinityMgLCaCO3', 'inorganicCarbonMgLC'],
+  ['alkalinityMgLCaCO3', 'carbonDioxideAtm'],
+  ['inorganicCarbonMgLC', 'carbonDioxideAtm'],
+] as const;
+
 /** Upper ends of what raw, process and finished waters hold, mg/L. Ionic strength stays below 0.5. */
 const HIGHEST: Readonly<Record<Analyte, number>> = {
   calcium: 400,
